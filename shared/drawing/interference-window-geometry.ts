@@ -1,0 +1,181 @@
+/**
+ * The interference window as plain numbers and words, for the screen (SVG) and for the printed
+ * sheets (PDF) alike. The axis is as-made diametral interference in micrometres: the left mark is the
+ * least that still holds, the right mark the most the parts stand, the bar the band the tolerances
+ * can produce. Types only from elsewhere; drawing it is the caller's.
+ */
+import type { HubResult } from '../recalculation/layout-results'
+
+export interface WindowValues {
+  /** Band of the tolerances, as made. */
+  minUm: number | null
+  maxUm: number | null
+  /** Least interference that holds; null when it cannot be computed. */
+  requiredUm: number | null
+  requiredCause: string
+  /** Most interference the parts stand. */
+  permissibleUm: number | null
+  permissibleCause: string
+  isEmpty: boolean
+}
+
+/** `slips`: the loosest pair is below the window; `yields`: the tightest is above it. */
+export type WindowState = 'inside' | 'slips' | 'yields' | 'slipsAndYields' | 'empty' | 'unknown'
+
+export interface WindowScale {
+  fromUm: number
+  toUm: number
+  ticksUm: number[]
+}
+
+export interface Span {
+  from: number
+  to: number
+}
+
+export interface WindowGeometry {
+  state: WindowState
+  /** Zones left and right of the window; where the window is empty both reach over the gap. */
+  slipZone: Span | null
+  window: Span | null
+  yieldZone: Span | null
+  /** From permissible to required when the window is empty. */
+  gap: Span | null
+  bar: Span | null
+  /** Parts of the bar outside the window, each to be drawn with a pattern as well as a colour. */
+  barBelow: Span | null
+  barAbove: Span | null
+  requiredMark: number | null
+  permissibleMark: number | null
+  zeroMark: number | null
+}
+
+export function windowValuesOf(hub: HubResult): WindowValues {
+  return {
+    minUm: hub.interference.minUm,
+    maxUm: hub.interference.maxUm,
+    requiredUm: hub.window.requiredUm,
+    requiredCause: hub.window.requiredCause,
+    permissibleUm: hub.window.permissibleUm,
+    permissibleCause: hub.window.permissibleCause,
+    isEmpty: hub.window.isEmpty,
+  }
+}
+
+export function windowState(values: WindowValues): WindowState {
+  if (values.isEmpty) return 'empty'
+  const { minUm, maxUm, requiredUm, permissibleUm } = values
+  if (minUm === null || maxUm === null || (requiredUm === null && permissibleUm === null)) return 'unknown'
+  const slips = requiredUm !== null && minUm < requiredUm
+  const yields = permissibleUm !== null && maxUm > permissibleUm
+  if (slips && yields) return 'slipsAndYields'
+  if (slips) return 'slips'
+  return yields ? 'yields' : 'inside'
+}
+
+/** The status chip of a hub. */
+export const WINDOW_STATE_WORDS: Record<WindowState, string> = {
+  inside: 'Inside window',
+  slips: 'Slips',
+  yields: 'Too tight',
+  slipsAndYields: 'Slips and too tight',
+  empty: 'Window is empty',
+  unknown: 'Not computed',
+}
+
+/** A sign beside the word, so that state is not colour alone and survives black-and-white print. */
+export const WINDOW_STATE_SIGNS: Record<WindowState, string> = {
+  inside: '✓',
+  slips: '◀',
+  yields: '▶',
+  slipsAndYields: '◀▶',
+  empty: '✕',
+  unknown: '?',
+}
+
+/** Room beyond the outermost mark, as a share of the span, so that no mark sits on the edge. */
+const MARGIN_SHARE = 0.12
+
+/**
+ * A scale wide enough for every window given. One window: its own scale (inspector, sheet of one
+ * hub). All hubs of a layout: the common scale of the schedule. Starts at zero unless something
+ * lies below it.
+ */
+export function windowScale(windows: readonly WindowValues[]): WindowScale {
+  let least = 0
+  let most = 0
+  for (const { minUm, maxUm, requiredUm, permissibleUm } of windows) {
+    for (const value of [minUm, maxUm, requiredUm, permissibleUm]) {
+      if (value === null || !Number.isFinite(value)) continue
+      least = Math.min(least, value)
+      most = Math.max(most, value)
+    }
+  }
+  if (most - least < 10) most = least + 10
+  const step = tickStep(most - least)
+  const margin = (most - least) * MARGIN_SHARE
+  const fromUm = least < 0 ? Math.floor((least - margin) / step) * step : 0
+  const toUm = Math.ceil((most + margin) / step) * step
+  const ticksUm: number[] = []
+  for (let tick = fromUm; tick <= toUm + step / 1_000; tick += step) ticksUm.push(Math.round(tick))
+  return { fromUm, toUm, ticksUm }
+}
+
+/** Four to eight ticks at 1, 2, 2.5 or 5 times a power of ten, whole micrometres. */
+function tickStep(span: number): number {
+  const rough = span / 5
+  const power = 10 ** Math.floor(Math.log10(rough))
+  const step = [1, 2, 2.5, 5, 10].map((factor) => factor * power).find((candidate) => candidate >= rough)
+  return Math.max(1, Math.round(step ?? power * 10))
+}
+
+/** Where everything lies over `width` units of drawing. Positions are clamped to the drawing. */
+export function windowGeometry(values: WindowValues, scale: WindowScale, width: number): WindowGeometry {
+  const span = scale.toUm - scale.fromUm
+  const at = (um: number) => Math.min(width, Math.max(0, ((um - scale.fromUm) / span) * width))
+  const { minUm, maxUm, requiredUm, permissibleUm } = values
+  const state = windowState(values)
+  const required = requiredUm === null ? null : at(requiredUm)
+  const permissible = permissibleUm === null ? null : at(permissibleUm)
+  const bar = minUm === null || maxUm === null ? null : spanOf(at(minUm), at(maxUm))
+  const isEmpty = state === 'empty'
+  const hasMark = required !== null || permissible !== null
+  return {
+    state,
+    slipZone: required === null ? null : spanOf(0, required),
+    window: isEmpty || !hasMark ? null : spanOf(required ?? 0, permissible ?? width),
+    yieldZone: permissible === null ? null : spanOf(permissible, width),
+    gap: isEmpty && required !== null && permissible !== null ? spanOf(permissible, required) : null,
+    bar,
+    barBelow:
+      bar !== null && required !== null && bar.from < required
+        ? spanOf(bar.from, Math.min(bar.to, required))
+        : null,
+    barAbove:
+      bar !== null && permissible !== null && bar.to > permissible
+        ? spanOf(Math.max(bar.from, permissible), bar.to)
+        : null,
+    requiredMark: required,
+    permissibleMark: permissible,
+    zeroMark: scale.fromUm < 0 ? at(0) : null,
+  }
+}
+
+const spanOf = (from: number, to: number): Span => ({ from: Math.min(from, to), to: Math.max(from, to) })
+
+const um = (value: number) => `${Math.round(value)} µm`
+
+/** One sentence that says what the drawing shows. */
+export function windowSentence(values: WindowValues): string {
+  const { minUm, maxUm, requiredUm, permissibleUm, requiredCause, permissibleCause } = values
+  const band =
+    minUm === null || maxUm === null
+      ? 'The band of the tolerances is not computed.'
+      : `Made with ${Math.round(minUm)} to ${um(maxUm)} of interference.`
+  const cause = (text: string) => (text === '' ? '' : ` (${text})`)
+  const least = requiredUm === null ? '' : `needs at least ${um(requiredUm)}${cause(requiredCause)}`
+  const most = permissibleUm === null ? '' : `stands at most ${um(permissibleUm)}${cause(permissibleCause)}`
+  const limits = [least, most].filter((text) => text !== '')
+  const sentence = limits.length === 0 ? 'Its limits are not computed' : `It ${limits.join(' and ')}`
+  return `${WINDOW_STATE_WORDS[windowState(values)]}. ${band} ${sentence}.`
+}
