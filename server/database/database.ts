@@ -1,0 +1,22 @@
+/** The map of all tables. Each domain declares its own rows beside its repository. */
+import type {
+  AccountTable,
+  InvitationTable,
+  MemberTable,
+  OrganizationTable,
+  SessionTable,
+  UserTable,
+  VerificationTable,
+} from '../accounts/accounts.table'
+import type { LayoutTable } from '../layouts/layout.table'
+
+export interface Database {
+  user: UserTable
+  session: SessionTable
+  account: AccountTable
+  verification: VerificationTable
+  organization: OrganizationTable
+  member: MemberTable
+  invitation: InvitationTable
+  layout: LayoutTable
+}
