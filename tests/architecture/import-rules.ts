@@ -100,7 +100,14 @@ const CLIENT_ZONES: Zone[] = [
   {
     name: 'src/lib',
     files: ['src/lib/**'],
-    mayImport: ['src/lib/**', 'src/config/**', 'src/stores/preferences-store', 'shared/**'],
+    // The session's interface only: the context that hands an open layout down lives here.
+    mayImport: [
+      'src/lib/**',
+      'src/config/**',
+      'src/stores/preferences-store',
+      'src/sync/layout-session',
+      'shared/**',
+    ],
     packages: ['*'],
     neverPackages: [...CANVAS_PACKAGES, 'socket.io-client'],
     mayUseNode: false,
