@@ -13,6 +13,8 @@ export interface Compilable<Row> {
 }
 
 export interface Queries {
+  /** Builds queries; its own transactions are refused. */
+  readonly kysely: Kysely<Database>
   all<Row>(query: Compilable<Row>): Row[]
   first<Row>(query: Compilable<Row>): Row | undefined
   /** For statements without RETURNING. */
@@ -25,8 +27,6 @@ export interface WriteTransaction extends Queries {
 }
 
 export interface AppDatabase extends Queries {
-  /** Builds queries; its own transactions are refused. */
-  readonly kysely: Kysely<Database>
   readonly handle: SqliteHandle.Database
   writeTransaction<Result>(work: (tx: WriteTransaction) => Synchronous<Result>): Result
   close(): void
@@ -71,6 +71,7 @@ export function openDatabase(file: string): AppDatabase {
   }
 
   const queries: Queries = {
+    kysely: new Kysely<Database>({ dialect: new QueryOnlyDialect({ database: handle }) }),
     all<Row>(query: Compilable<Row>): Row[] {
       const { sql, parameters } = query.compile()
       return prepare(sql).all(...parameters) as Row[]
@@ -89,7 +90,6 @@ export function openDatabase(file: string): AppDatabase {
   return {
     ...queries,
     handle,
-    kysely: new Kysely<Database>({ dialect: new QueryOnlyDialect({ database: handle }) }),
     writeTransaction(work) {
       return handle.transaction(() => work(transaction)).immediate()
     },
