@@ -8,6 +8,16 @@ import { z } from 'zod'
 export const LAYOUT_FORMAT = 'hubstead-layout'
 export const LAYOUT_VERSION = 1
 
+/** How long each list may get; an operation that would go beyond it is refused. */
+export const LIST_LIMITS = {
+  sections: 200,
+  hubs: 200,
+  bearings: 60,
+  loadCases: 100,
+  loads: 500,
+  timing: 200,
+} as const
+
 const finite = z.number().finite()
 const positive = finite.positive()
 const nonNegative = finite.nonnegative()
@@ -149,7 +159,7 @@ export const loadCaseSchema = z.strictObject({
   shaftC: finite.min(-200).max(1_000).default(20),
   hubC: finite.min(-200).max(1_000).default(20),
   hubTemperaturesC: z.record(partIdSchema, finite.min(-200).max(1_000)).optional(),
-  loads: z.array(loadSchema).max(500),
+  loads: z.array(loadSchema).max(LIST_LIMITS.loads),
   criteria: criteriaSchema.partial().optional(),
 })
 
@@ -175,11 +185,14 @@ export const layoutDocumentSchema = z.strictObject({
   format: z.literal(LAYOUT_FORMAT),
   version: z.literal(LAYOUT_VERSION),
   name: nameSchema,
-  shaft: z.strictObject({ material: materialSchema, sections: z.array(shaftSectionSchema).max(200) }),
-  hubs: z.array(hubSchema).max(200),
-  bearings: z.array(bearingSchema).max(60),
-  loadCases: z.array(loadCaseSchema).max(100),
-  timing: z.array(timingEntrySchema).max(200),
+  shaft: z.strictObject({
+    material: materialSchema,
+    sections: z.array(shaftSectionSchema).max(LIST_LIMITS.sections),
+  }),
+  hubs: z.array(hubSchema).max(LIST_LIMITS.hubs),
+  bearings: z.array(bearingSchema).max(LIST_LIMITS.bearings),
+  loadCases: z.array(loadCaseSchema).max(LIST_LIMITS.loadCases),
+  timing: z.array(timingEntrySchema).max(LIST_LIMITS.timing),
   criteria: criteriaSchema,
 })
 

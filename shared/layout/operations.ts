@@ -39,9 +39,10 @@ export const setOperationSchema = z.strictObject({
   field: z
     .string()
     .min(1)
-    .max(64)
-    .regex(/^[A-Za-z][A-Za-z0-9 _:-]*(\.[A-Za-z0-9][A-Za-z0-9 _:-]*)?$/),
-  before: z.unknown(),
+    .max(96)
+    .regex(/^[A-Za-z][A-Za-z0-9]*(\.[A-Za-z0-9][A-Za-z0-9 _.:-]*)?$/),
+  /** Left out when the field was absent (JSON has no `undefined`). */
+  before: z.unknown().optional(),
   value: z.unknown(),
 })
 
