@@ -18,12 +18,12 @@ export async function up(db: Kysely<unknown>): Promise<void> {
       sequence INTEGER NOT NULL CHECK (sequence >= 1),
       revision_letter TEXT NOT NULL,
       revision INTEGER NOT NULL CHECK (revision >= 0),
-      document TEXT NOT NULL,
+      document TEXT NOT NULL CHECK (json_valid(document)),
       document_hash TEXT NOT NULL,
-      results TEXT NOT NULL,
+      results TEXT NOT NULL CHECK (json_valid(results)),
       engine_version TEXT NOT NULL,
       verdict TEXT NOT NULL CHECK (verdict IN ('passes', 'fails')),
-      acceptances TEXT NOT NULL,
+      acceptances TEXT NOT NULL CHECK (json_valid(acceptances)),
       note TEXT NOT NULL,
       review_asked_by_name TEXT,
       review_asked_at TEXT,
@@ -90,11 +90,4 @@ export async function up(db: Kysely<unknown>): Promise<void> {
     WHEN EXISTS (SELECT 1 FROM layout_release WHERE layout_id = OLD.id)
       AND (NEW.id IS NOT OLD.id OR NEW.workspace_id IS NOT OLD.workspace_id)
     BEGIN SELECT RAISE(ABORT, 'a layout with releases stays in its workspace'); END`.execute(db)
-}
-
-export async function down(db: Kysely<unknown>): Promise<void> {
-  await sql`DROP TRIGGER layout_with_release_refuses_move`.execute(db)
-  await sql`DROP TRIGGER layout_with_release_refuses_delete`.execute(db)
-  await sql`DROP TABLE layout_release_withdrawal`.execute(db)
-  await sql`DROP TABLE layout_release`.execute(db)
 }

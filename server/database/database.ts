@@ -9,6 +9,7 @@ import type {
   VerificationTable,
 } from '../accounts/accounts.table'
 import type { LayoutTable } from '../layouts/layout.table'
+import type { LayoutReleaseTable, LayoutReleaseWithdrawalTable } from '../releases/releases.table'
 
 export interface Database {
   user: UserTable
@@ -19,4 +20,6 @@ export interface Database {
   member: MemberTable
   invitation: InvitationTable
   layout: LayoutTable
+  layout_release: LayoutReleaseTable
+  layout_release_withdrawal: LayoutReleaseWithdrawalTable
 }
