@@ -74,6 +74,7 @@ export interface EditNotice {
   what: string
   /** Whose value was overwritten, or who removed the part. */
   byName: string | null
+  byUserId: string | null
 }
 
 /** Status changes stand in the same sequence as edits (with no operations), so that what came before a freeze is in it. */
@@ -145,6 +146,13 @@ export interface ClientToServerEvents {
 
 export interface ServerToClientEvents {
   'edit:accepted': (message: { layoutId: string; edit: AcceptedEdit }) => void
+  /** To the person whose removal made somebody's edit come to nothing; such an edit has no revision. */
+  'edit:dropped': (message: {
+    layoutId: string
+    userName: string
+    label: string
+    notices: EditNotice[]
+  }) => void
   /** Status, letter or role changed: freeze, withdraw, next revision, review, change of role. */
   'access:changed': (message: { layoutId: string; access: LayoutAccess; byName: string | null }) => void
   /** The person may no longer see this layout; the socket leaves it. */

@@ -5,6 +5,8 @@ import type { EditNotice, LayoutAccess, Person, PresenceState, RejectReason } fr
 
 export interface PendingEdit {
   editId: string
+  /** The tab that made the edit: a new tab also sends what a closed one left behind. */
+  clientId: string
   clientSeq: number
   baseRevision: number
   label: string
@@ -17,8 +19,14 @@ export interface RefusedEdit extends PendingEdit {
   message: string
 }
 
-export interface Notice extends EditNotice {
+/** Server notices, and what undo has to say about itself. */
+export type NoticeKind = EditNotice['kind'] | 'undoSkipped' | 'undoRefused'
+
+export interface Notice extends Omit<EditNotice, 'kind'> {
   id: string
+  kind: NoticeKind
+  /** The whole sentence to show. */
+  message: string
   /** True when this person's own edit was affected. */
   isMine: boolean
   label: string
@@ -52,6 +60,8 @@ export interface LayoutState {
   refusedReason: { reason: RejectReason; message: string } | null
   notices: Notice[]
   refusedEdits: RefusedEdit[]
+  /** Words when this browser cannot keep unsaved edits over a reload; null when it can. */
+  storageFailure: string | null
   canUndo: boolean
   canRedo: boolean
   undoLabel: string | null
