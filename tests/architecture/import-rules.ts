@@ -118,7 +118,7 @@ const CLIENT_ZONES: Zone[] = [
     files: ['src/components/**'],
     mayImport: ['src/components/**', 'src/lib/**', 'src/config/**', 'src/stores/preferences-store'],
     packages: ['*'],
-    neverPackages: [...CANVAS_PACKAGES, 'socket.io-client', 'zustand'],
+    neverPackages: [...CANVAS_PACKAGES, 'socket.io-client'],
     mayUseNode: false,
     why: 'the UI kit does not know the domain',
   },
