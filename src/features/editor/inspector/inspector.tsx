@@ -1,0 +1,13 @@
+import { useLayoutStore } from '@/stores/layout-store'
+
+export function Inspector() {
+  const layout = useLayoutStore((state) => state.visible)
+  if (layout === null) return null
+  return (
+    <ul aria-label="Inspector">
+      {layout.hubs.map((item) => (
+        <li key={item.id}>{'name' in item ? item.name : item.id}</li>
+      ))}
+    </ul>
+  )
+}

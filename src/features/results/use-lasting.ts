@@ -1,0 +1,18 @@
+import { useEffect, useState } from 'react'
+
+/** A run takes a few milliseconds; words that flash for that long only disturb. */
+const UPDATING_SHOWN_AFTER_MS = 250
+
+/** True once `isOn` has lasted long enough to be worth saying. */
+export function useLasting(isOn: boolean, afterMs = UPDATING_SHOWN_AFTER_MS): boolean {
+  const [hasLasted, setHasLasted] = useState(false)
+  useEffect(() => {
+    if (!isOn) return
+    const timer = setTimeout(() => setHasLasted(true), afterMs)
+    return () => {
+      clearTimeout(timer)
+      setHasLasted(false)
+    }
+  }, [isOn, afterMs])
+  return isOn && hasLasted
+}
