@@ -112,7 +112,7 @@ export const invitationViewSchema = invitationSchema.extend({ workspaceName: z.s
 /** POST /api/workspaces -> 201; the creator becomes admin. PATCH /api/workspaces/:id renames. */
 export const createWorkspaceBodySchema = z.strictObject({ name: z.string().trim().min(1).max(80) })
 
-/** GET /api/me/sessions; DELETE /api/me/sessions/:id -> 204; DELETE /api/me/sessions revokes the others. */
+/** One of GET /api/me/sessions; DELETE /api/me/sessions/:id -> 204; DELETE /api/me/sessions revokes the others. */
 export const sessionViewSchema = z.strictObject({
   id: z.string(),
   createdAt: z.string(),
@@ -122,7 +122,10 @@ export const sessionViewSchema = z.strictObject({
   isCurrent: z.boolean(),
 })
 
-/** GET /api/caught-mail: only while the local mail catcher runs. */
+/** GET /api/me/sessions */
+export const sessionListSchema = z.strictObject({ sessions: z.array(sessionViewSchema) })
+
+/** One of GET /api/caught-mail; 404 unless the local mail catcher runs. */
 export const caughtMailSchema = z.strictObject({
   id: z.string(),
   at: z.string(),
@@ -131,6 +134,9 @@ export const caughtMailSchema = z.strictObject({
   text: z.string(),
   links: z.array(z.string()),
 })
+
+/** GET /api/caught-mail, newest first. */
+export const caughtMailListSchema = z.strictObject({ mails: z.array(caughtMailSchema) })
 
 export type Me = z.infer<typeof meSchema>
 export type Member = z.infer<typeof memberSchema>

@@ -70,13 +70,14 @@ export const layoutViewSchema = layoutSummarySchema.omit({ thumbnail: true, peop
 })
 // GET /api/layouts/:layoutId/export -> the layout file as an attachment
 
-/** GET /api/examples */
+/** One of GET /api/examples, for any signed-in person. */
 export const exampleSchema = z.strictObject({
   id: z.string(),
   name: z.string(),
   story: z.string(),
   thumbnail: thumbnailSchema,
 })
+export const exampleListSchema = z.strictObject({ examples: z.array(exampleSchema) })
 
 export type LayoutStatus = z.infer<typeof layoutStatusSchema>
 export type Thumbnail = z.infer<typeof thumbnailSchema>
