@@ -53,7 +53,7 @@ function figure(name: string, times: number[], goal: number | null): BenchFigure
   }
 }
 
-export async function measureServerStart(): Promise<BenchFigure[]> {
+export async function measure(): Promise<BenchFigure[]> {
   const onNewFolder: number[] = []
   const again: number[] = []
   // Not measured: whatever must be built is built here.
