@@ -59,7 +59,16 @@ const STEPS: Partial<Record<QuantityKind, { metric: number; inch: number }>> = {
  * was typed when it cannot be read. Enter or leaving commits, Escape restores, arrow keys nudge.
  */
 export function QuantityField(props: QuantityFieldProps) {
-  const { label, kind, value, arrangement = 'stacked', isReadOnly = false, isOptional = false, hint, badge } = props
+  const {
+    label,
+    kind,
+    value,
+    arrangement = 'stacked',
+    isReadOnly = false,
+    isOptional = false,
+    hint,
+    badge,
+  } = props
   const system = usePreferencesStore((state) => state.units)
   const id = useId()
   const [draft, setDraft] = useState<string | null>(() => keptDraft(props.draftKey)?.text ?? null)
@@ -130,15 +139,22 @@ export function QuantityField(props: QuantityFieldProps) {
 
   const nudge = (direction: 1 | -1, { shiftKey, altKey }: KeyboardEvent) => {
     const shown = displayUnit(kind, system)
-    const current = draft === null ? value : (() => {
-      const result = parseQuantity(draft, { kind, system, allowsRadial: props.allowsRadial })
-      return result.ok ? result.value : null
-    })()
+    const current =
+      draft === null
+        ? value
+        : (() => {
+            const result = parseQuantity(draft, { kind, system, allowsRadial: props.allowsRadial })
+            return result.ok ? result.value : null
+          })()
     if (current === null || current === undefined) return
     const step =
-      props.step === undefined ? (STEPS[kind]?.[system] ?? 1) : Math.abs(fromStored(props.step, { ...shown, offset: 0 }))
+      props.step === undefined
+        ? (STEPS[kind]?.[system] ?? 1)
+        : Math.abs(fromStored(props.step, { ...shown, offset: 0 }))
     const factor = shiftKey ? 10 : altKey ? 0.1 : 1
-    change(formatEntered(toStored(fromStored(current, shown) + direction * step * factor, shown), kind, system))
+    change(
+      formatEntered(toStored(fromStored(current, shown) + direction * step * factor, shown), kind, system),
+    )
   }
 
   const onKeyDown = (event: KeyboardEvent<HTMLInputElement>) => {
@@ -158,12 +174,15 @@ export function QuantityField(props: QuantityFieldProps) {
     }
   }
 
-  const describedBy = [message === null ? '' : `${id}-error`, hint ? `${id}-hint` : ''].filter(Boolean).join(' ')
+  const describedBy = [message === null ? '' : `${id}-error`, hint ? `${id}-hint` : '']
+    .filter(Boolean)
+    .join(' ')
   const isCell = arrangement === 'cell'
   return (
     <div
       className={classNames(
-        arrangement === 'row' && 'grid grid-cols-[1fr_auto] items-center gap-x-3 border-b border-dashed border-hairline py-0.5',
+        arrangement === 'row' &&
+          'grid grid-cols-[1fr_auto] items-center gap-x-3 border-b border-dashed border-hairline py-0.5',
         arrangement === 'stacked' && 'grid content-start gap-0.5',
         props.className,
       )}
@@ -176,7 +195,13 @@ export function QuantityField(props: QuantityFieldProps) {
       <span
         className={classNames(
           'flex items-baseline rounded border bg-transparent focus-within:border-steel focus-within:bg-card focus-within:outline-2 focus-within:-outline-offset-1 focus-within:outline-steel',
-          message !== null ? 'border-bad bg-bad-soft' : isReadOnly ? 'border-transparent' : isCell ? 'border-transparent hover:border-edge' : 'border-hairline bg-card hover:border-edge',
+          message !== null
+            ? 'border-bad bg-bad-soft'
+            : isReadOnly
+              ? 'border-transparent'
+              : isCell
+                ? 'border-transparent hover:border-edge'
+                : 'border-hairline bg-card hover:border-edge',
           arrangement === 'row' && 'w-32',
         )}
       >
@@ -227,7 +252,14 @@ export function QuantityField(props: QuantityFieldProps) {
         </p>
       )}
       {hint && (
-        <p id={`${id}-hint`} className={classNames('text-xs text-quiet', arrangement === 'row' && 'col-span-2', isCell && 'sr-only')}>
+        <p
+          id={`${id}-hint`}
+          className={classNames(
+            'text-xs text-quiet',
+            arrangement === 'row' && 'col-span-2',
+            isCell && 'sr-only',
+          )}
+        >
           {hint}
         </p>
       )}
@@ -237,7 +269,12 @@ export function QuantityField(props: QuantityFieldProps) {
 
 function rangeProblem(
   value: number,
-  { kind, min, max, isMinExclusive = false }: Pick<QuantityFieldProps, 'kind' | 'min' | 'max' | 'isMinExclusive'>,
+  {
+    kind,
+    min,
+    max,
+    isMinExclusive = false,
+  }: Pick<QuantityFieldProps, 'kind' | 'min' | 'max' | 'isMinExclusive'>,
   system: UnitSystem,
 ): string | null {
   if (min !== undefined && (isMinExclusive ? value <= min : value < min)) {

@@ -147,6 +147,21 @@ const CLIENT_ZONES: Zone[] = [
     why: 'the sync engine runs without React and without a canvas',
   },
   {
+    name: 'src/fields',
+    files: ['src/fields/**'],
+    mayImport: [
+      'src/fields/**',
+      'src/components/**',
+      'src/lib/**',
+      'src/stores/**',
+      'src/sync/layout-session',
+      'shared/**',
+    ],
+    packages: [...REACT_PACKAGES, 'zustand'],
+    mayUseNode: false,
+    why: 'fields tie the UI kit to the open layout for every panel that edits it; they know no feature',
+  },
+  {
     name: 'src/workers',
     files: ['src/workers/**'],
     mayImport: ['src/workers/**', 'shared/**'],
@@ -168,6 +183,7 @@ const CLIENT_ZONES: Zone[] = [
 const FEATURE_MAY_IMPORT = [
   'src/components/**',
   'src/drawings/**',
+  'src/fields/**',
   'src/lib/**',
   'src/stores/**',
   'src/config/**',

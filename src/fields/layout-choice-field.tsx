@@ -1,0 +1,89 @@
+import { useId } from 'react'
+import { classNames } from '@/components/class-names'
+import { Icon } from '@/components/icon'
+import { EditorsBadge } from './editors-badge'
+import { type FieldAddress, useLayoutField } from './layout-field'
+
+export interface Choice {
+  value: string
+  label: string
+}
+
+interface LayoutChoiceFieldProps {
+  label: string
+  address: FieldAddress
+  options: readonly Choice[]
+  arrangement?: 'stacked' | 'row' | 'cell'
+  /** From the option chosen to what is stored. */
+  toStored?: (value: string) => unknown
+  /** From what is stored to an option. */
+  fromStored?: (value: unknown) => string
+  className?: string
+}
+
+/** One of a few values of the layout; choosing commits at once. */
+export function LayoutChoiceField({
+  label,
+  address,
+  options,
+  arrangement = 'stacked',
+  toStored = (value) => value,
+  fromStored = (value) => (typeof value === 'string' ? value : ''),
+  className,
+}: LayoutChoiceFieldProps) {
+  const id = useId()
+  const field = useLayoutField(address)
+  const values = new Set(address.targets.map(({ value }) => fromStored(value)))
+  const [only = ''] = values
+  const isMixed = values.size > 1
+  const isKnown = !isMixed && options.some(({ value }) => value === only)
+  return (
+    <div
+      className={classNames(
+        arrangement === 'row' &&
+          'grid grid-cols-[1fr_auto] items-center gap-x-3 border-b border-dashed border-hairline py-0.5',
+        arrangement === 'stacked' && 'grid content-start gap-0.5',
+        className,
+      )}
+    >
+      <label
+        htmlFor={id}
+        className={arrangement === 'cell' ? 'sr-only' : 'flex items-center gap-1.5 text-xs text-quiet'}
+      >
+        {label}
+        <EditorsBadge names={field.editors} />
+      </label>
+      <span
+        className={classNames(
+          'relative flex items-center rounded border focus-within:outline-2 focus-within:-outline-offset-1 focus-within:outline-steel',
+          field.isReadOnly
+            ? 'border-transparent'
+            : arrangement === 'cell'
+              ? 'border-transparent hover:border-edge'
+              : 'border-hairline bg-card hover:border-edge',
+          arrangement === 'row' && 'min-w-32',
+        )}
+      >
+        <select
+          id={id}
+          disabled={field.isReadOnly}
+          value={isKnown ? only : ''}
+          className="w-full min-w-0 appearance-none bg-transparent py-1 pr-6 pl-2 text-sm font-semibold outline-none disabled:text-ink disabled:opacity-100"
+          onFocus={() => field.setFocused(true)}
+          onBlur={() => field.setFocused(false)}
+          onChange={(event) => field.commit(toStored(event.target.value))}
+        >
+          {!isKnown && <option value="">{isMixed ? 'several' : only}</option>}
+          {options.map(({ value, label: text }) => (
+            <option key={value} value={value}>
+              {text}
+            </option>
+          ))}
+        </select>
+        {!field.isReadOnly && (
+          <Icon name="chevronDown" className="pointer-events-none absolute right-1.5 size-3 text-quiet" />
+        )}
+      </span>
+    </div>
+  )
+}

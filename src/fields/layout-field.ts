@@ -1,0 +1,119 @@
+/**
+ * Ties one field to one value of the open layout: reads whether it may be edited and who else is
+ * typing in it, previews and commits through the session, reports the own focus as presence.
+ */
+import { useRef } from 'react'
+import { useShallow } from 'zustand/react/shallow'
+import { useLayoutSession } from '@/lib/layout-session-context'
+import { useLayoutStore } from '@/stores/layout-store'
+import type { CommitResult } from '@/sync/layout-session'
+import type { Operation, Target } from '@shared/layout/operations'
+
+/** A target and the value its field has on screen. Several when several parts are selected. */
+export interface FieldTarget {
+  target: Target
+  value: unknown
+}
+
+export interface FieldAddress {
+  /** A name for the undo list and for notices: "Length of Pinion". */
+  label: string
+  targets: readonly FieldTarget[]
+  field: string
+}
+
+export interface LayoutField {
+  isReadOnly: boolean
+  /** Names of others typing in this field now. */
+  editors: string[]
+  draftKey: string
+  preview: (value: unknown) => void
+  /** What is wrong, or null when it was taken. */
+  commit: (value: unknown) => string | null
+  cancel: () => void
+  setFocused: (isFocused: boolean) => void
+}
+
+/** `hub:A:lengthMm`, `load:run:load-1:torqueNm`: how presence names a field. */
+export function presenceKey(target: Target, field: string): string {
+  switch (target.kind) {
+    case 'layout':
+    case 'shaft':
+    case 'criteria':
+      return `${target.kind}:${field}`
+    case 'load':
+      return `load:${target.loadCaseId}:${target.id}:${field}`
+    case 'timing':
+      return `timing:${target.hub}:${field}`
+    default:
+      return `${target.kind}:${target.id}:${field}`
+  }
+}
+
+/** Sets one field of each target. */
+export function setOperations(targets: readonly FieldTarget[], field: string, value: unknown): Operation[] {
+  return targets.map(({ target, value: before }) => ({
+    type: 'set',
+    target,
+    field,
+    before: before ?? null,
+    value: value ?? null,
+  }))
+}
+
+/** Plain words for a commit that did not go through, null for one that did. */
+export function commitProblem(result: CommitResult): string | null {
+  switch (result.kind) {
+    case 'pending':
+    case 'noEffect':
+      if (result.dropped.some(({ reason }) => reason === 'invalidValue'))
+        return 'This value is not possible here'
+      if (result.dropped.some(({ reason }) => reason === 'targetMissing'))
+        return 'This part was removed meanwhile'
+      return null
+    case 'readOnly':
+    case 'tooLarge':
+      return result.message
+  }
+}
+
+export function useLayoutField({ label, targets, field }: FieldAddress): LayoutField {
+  const session = useLayoutSession()
+  const layoutId = useLayoutStore((state) => state.layoutId)
+  const canEdit = useLayoutStore((state) => state.access?.canEdit ?? false)
+  const keys = targets.map(({ target }) => presenceKey(target, field))
+  const editors = useLayoutStore(
+    useShallow((state) =>
+      state.people
+        .filter(
+          ({ connectionId, editing }) =>
+            connectionId !== state.you?.connectionId && editing !== null && keys.includes(editing),
+        )
+        .map(({ name }) => name),
+    ),
+  )
+  /** What was on screen before the first preview; afterwards `targets` hold the preview itself. */
+  const seen = useRef<readonly FieldTarget[] | null>(null)
+  const key = keys[0] ?? field
+
+  return {
+    isReadOnly: !canEdit,
+    editors,
+    draftKey: `${layoutId}:${keys.join('|')}`,
+    preview: (value) => {
+      seen.current ??= targets
+      session.setPreview(label, setOperations(seen.current, field, value))
+    },
+    commit: (value) => {
+      const operations = setOperations(seen.current ?? targets, field, value)
+      seen.current = null
+      return commitProblem(session.commit(label, operations))
+    },
+    cancel: () => {
+      if (seen.current === null) return
+      seen.current = null
+      session.clearPreview()
+    },
+    setFocused: (isFocused) => session.updatePresence({ editing: isFocused && canEdit ? key : null }),
+  }
+}
