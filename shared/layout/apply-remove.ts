@@ -1,13 +1,15 @@
 import { dropOperation, type ApplyResult } from './apply-result'
 import { applySet } from './apply-set'
+import { targetWords } from './field-words'
 import { findTarget } from './find-target'
 import type { LayoutDocument } from './layout-document'
 import type { Operation, RemoveOperation, SetOperation } from './operations'
 import { withLoads, withSections } from './replace-target'
 
-export function applyRemove(document: LayoutDocument, operation: RemoveOperation): ApplyResult {
-  const { target } = operation
-  if (!findTarget(document, target)) return dropOperation(document, operation, 'targetMissing')
+export function applyRemove(document: LayoutDocument, request: RemoveOperation): ApplyResult {
+  const { target } = request
+  if (!findTarget(document, target)) return dropOperation(document, request, 'targetMissing')
+  const operation = { ...request, name: targetWords(document, target) }
   switch (target.kind) {
     case 'section':
       return removed(withSections(document, without(document.shaft.sections, target.id)), operation)

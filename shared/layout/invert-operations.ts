@@ -6,6 +6,7 @@ import { applyOperation } from './apply-operations'
 import { findLoadCase } from './find-target'
 import type { LayoutDocument } from './layout-document'
 import type { AddOperation, Operation, RemoveOperation, ReorderOperation } from './operations'
+import { targetOfAdded } from './target-of-added'
 
 export function invertOperations(
   documentBefore: LayoutDocument,
@@ -34,24 +35,6 @@ function invertOperation(document: LayoutDocument, applied: Operation): Operatio
       return restoring(document, applied)
     case 'reorder':
       return reorderingBack(document, applied)
-  }
-}
-
-/** The target that an added item is from then on. */
-export function targetOfAdded(operation: AddOperation): RemoveOperation['target'] {
-  switch (operation.collection) {
-    case 'sections':
-      return { kind: 'section', id: operation.item.id }
-    case 'hubs':
-      return { kind: 'hub', id: operation.item.id }
-    case 'bearings':
-      return { kind: 'bearing', id: operation.item.id }
-    case 'loadCases':
-      return { kind: 'loadCase', id: operation.item.id }
-    case 'loads':
-      return { kind: 'load', loadCaseId: operation.loadCaseId, id: operation.item.id }
-    case 'timing':
-      return { kind: 'timing', hub: operation.item.hub }
   }
 }
 

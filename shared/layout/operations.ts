@@ -75,6 +75,8 @@ export const removeOperationSchema = z.strictObject({
     (target) => target.kind !== 'layout' && target.kind !== 'shaft' && target.kind !== 'criteria',
     'This cannot be removed',
   ),
+  /** Words for what was removed, filled in when the operation is applied: afterwards nobody could tell. */
+  name: z.string().max(200).optional(),
 })
 
 /** Sections and load cases have an order that people may change. */

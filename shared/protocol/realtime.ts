@@ -10,15 +10,28 @@ import type { Role } from './roles'
 
 export const PROTOCOL_VERSION = 1
 export const MAX_OPERATIONS_PER_EDIT = 400
+/** JSON text of one edit's operations. The socket itself refuses messages of MAX_MESSAGE_BYTES by closing. */
+export const MAX_EDIT_BYTES = 90_000
+export const MAX_MESSAGE_BYTES = 128 * 1024
+/** A document beyond this would be slow to open for everybody. */
+export const MAX_DOCUMENT_BYTES = 1_000_000
+/** A client that missed more edits than this gets the whole document instead. */
+export const MAX_CATCH_UP_EDITS = 500
 /** Pointer ghosts are pleasant at 20 Hz and not dearer than the edits themselves. */
 export const PRESENCE_INTERVAL_MS = 50
 
 const id = z.string().min(1).max(64)
+/** Author of log entries that no browser sent: status changes and renames over HTTP. */
+export const SERVER_CLIENT_ID = 'server'
+const clientIdSchema = id.refine((clientId) => clientId !== SERVER_CLIENT_ID, 'This name is taken')
 
 export const joinRequestSchema = z.strictObject({
   layoutId: id,
-  /** One per browser tab, random, kept in sessionStorage. */
-  clientId: id,
+  /**
+   * Random, new for each opened layout: a duplicated tab must not count on in the same sequence.
+   * What an earlier one left unsent is sent under its own client id.
+   */
+  clientId: clientIdSchema,
   protocolVersion: z.number().int(),
   /** Null on first join. */
   lastRevision: z.number().int().nonnegative().nullable(),
@@ -27,7 +40,7 @@ export const joinRequestSchema = z.strictObject({
 
 export const submitRequestSchema = z.strictObject({
   layoutId: id,
-  clientId: id,
+  clientId: clientIdSchema,
   /** Strictly increasing per client; an edit once sent is never changed. */
   clientSeq: z.number().int().positive(),
   editId: id,
