@@ -179,3 +179,27 @@ export function windowSentence(values: WindowValues): string {
   const sentence = limits.length === 0 ? 'Its limits are not computed' : `It ${limits.join(' and ')}`
   return `${WINDOW_STATE_WORDS[windowState(values)]}. ${band} ${sentence}.`
 }
+
+export interface PlacedLabel {
+  /** Middle of the text. */
+  at: number
+  row: number
+}
+
+/**
+ * Keeps labels inside the drawing and off each other: a label that would touch the one before it
+ * goes to the next row. `width` of a label and of the drawing in the same unit.
+ */
+export function placeLabels(labels: readonly { at: number; width: number }[], width: number): PlacedLabel[] {
+  const rowEnds: number[] = []
+  return labels.map((label) => {
+    const at = Math.min(
+      Math.max(label.at, label.width / 2),
+      Math.max(width - label.width / 2, label.width / 2),
+    )
+    let row = 0
+    while (row < rowEnds.length && at - label.width / 2 < (rowEnds[row] ?? 0)) row += 1
+    rowEnds[row] = at + label.width / 2
+    return { at, row }
+  })
+}
