@@ -8,6 +8,7 @@ import type {
   UserTable,
   VerificationTable,
 } from '../accounts/accounts.table'
+import type { LayoutEditBaseTable, LayoutEditReceiptTable, LayoutEditTable } from '../edits/edits.table'
 import type { LayoutTable } from '../layouts/layout.table'
 import type { LayoutReleaseTable, LayoutReleaseWithdrawalTable } from '../releases/releases.table'
 
@@ -20,6 +21,9 @@ export interface Database {
   member: MemberTable
   invitation: InvitationTable
   layout: LayoutTable
+  layout_edit: LayoutEditTable
+  layout_edit_base: LayoutEditBaseTable
+  layout_edit_receipt: LayoutEditReceiptTable
   layout_release: LayoutReleaseTable
   layout_release_withdrawal: LayoutReleaseWithdrawalTable
 }
