@@ -21,8 +21,6 @@ export class HttpError extends Error {
     message: string,
     /** Field path to message. */
     readonly fields: Record<string, string> = {},
-    /** The code of the sign-in package where the answer came from it, such as EMAIL_NOT_VERIFIED. */
-    readonly authCode: string | null = null,
   ) {
     super(message)
   }
@@ -47,34 +45,23 @@ const isRecord = (value: unknown): value is Record<string, unknown> =>
   typeof value === 'object' && value !== null && !Array.isArray(value)
 
 /**
- * Reads `{ error: { code, message, fields } }` and the flat `{ code, message }` of the sign-in endpoints.
- * By hand rather than by zod: the sign-in page must not carry a schema library for one object.
+ * Reads the one error shape by hand rather than by its schema: the sign-in page must not carry a schema
+ * library for one object. An answer of another shape (a proxy's page) gets our own words.
  */
 export function errorFromBody(status: number, body: unknown): HttpError {
-  const code = CODE_OF_STATUS[status] ?? 'internal'
-  const fallback =
-    status === 429
-      ? 'Too many attempts. Wait a minute and try again.'
-      : status >= 500
-        ? 'The server could not do this. Nothing was changed; try again.'
-        : 'The server refused this.'
-  if (!isRecord(body)) return new HttpError(status, code, fallback)
-  if (isRecord(body.error)) {
-    const { code: sentCode, message, fields } = body.error
-    return new HttpError(
-      status,
-      typeof sentCode === 'string' ? (sentCode as ErrorCode) : code,
-      typeof message === 'string' ? message : fallback,
-      isRecord(fields) ? (fields as Record<string, string>) : {},
-    )
-  }
+  const error = isRecord(body) && isRecord(body.error) ? body.error : {}
   return new HttpError(
     status,
-    code,
-    typeof body.message === 'string' && status < 500 ? body.message : fallback,
-    {},
-    typeof body.code === 'string' ? body.code : null,
+    typeof error.code === 'string' ? (error.code as ErrorCode) : (CODE_OF_STATUS[status] ?? 'internal'),
+    typeof error.message === 'string' ? error.message : fallbackMessage(status),
+    isRecord(error.fields) ? (error.fields as Record<string, string>) : {},
   )
+}
+
+function fallbackMessage(status: number): string {
+  if (status === 429) return 'Too many attempts. Wait a minute and try again.'
+  if (status >= 500) return 'The server could not do this. Try again in a moment.'
+  return 'The server refused this.'
 }
 
 async function readJson(response: Response): Promise<unknown> {
@@ -100,7 +87,7 @@ export async function request<T = void>(path: string, options: RequestOptions<T>
     })
   } catch (error) {
     if (signal?.aborted) throw error
-    throw new HttpError(0, 'unavailable', 'No connection to the server. Nothing was changed; try again.')
+    throw new HttpError(0, 'unavailable', 'No connection to the server. Check the line and try again.')
   }
   if (!response.ok) throw errorFromBody(response.status, await readJson(response))
   if (!schema) return undefined as T

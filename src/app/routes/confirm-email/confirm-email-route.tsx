@@ -4,21 +4,18 @@ import { buttonClasses } from '@/components/button'
 import { Spinner } from '@/components/spinner'
 import { paths } from '@/config/paths'
 import { confirmEmail } from '@/features/accounts/api/auth-endpoints'
-import { authErrors } from '@/features/accounts/auth-messages'
 import { safeNext, withNext } from '@/features/accounts/next-address'
+import { messageOf } from '@/lib/http-client'
 import { usePageTitle } from '../../use-page-title'
 
-/**
- * The link in the mail ends here: with a token to spend, or after the server has spent it
- * (`error` is set when that failed).
- */
+/** The link in the mail leads here; the token it carries is spent at once. */
 export default function ConfirmEmailRoute() {
   usePageTitle('Confirm e-mail address')
   const [search] = useSearchParams()
   const token = search.get('token')
   const next = safeNext(search.get('next'))
   const [failure, setFailure] = useState<string | null>(
-    search.get('error') ? 'This link has expired or was used already. Ask for a new one.' : null,
+    token ? null : 'The link is not complete; open it from the mail again.',
   )
   const [isBusy, setIsBusy] = useState(token !== null)
 
@@ -27,7 +24,7 @@ export default function ConfirmEmailRoute() {
     let isCurrent = true
     confirmEmail(token)
       .catch((error: unknown) => {
-        if (isCurrent) setFailure(authErrors(error instanceof Error ? error : null).form)
+        if (isCurrent) setFailure(messageOf(error))
       })
       .finally(() => {
         if (isCurrent) setIsBusy(false)

@@ -5,9 +5,9 @@ import { Button } from '@/components/button'
 import { TextField } from '@/components/text-field'
 import { paths } from '@/config/paths'
 import { requestPasswordReset } from '@/features/accounts/api/auth-endpoints'
-import { authErrors } from '@/features/accounts/auth-messages'
 import { CaughtMailHint } from '@/features/accounts/components/caught-mail-hint'
 import { emailProblem } from '@/features/accounts/field-rules'
+import { formErrors } from '@/features/accounts/form-errors'
 import { useSubmission } from '@/features/accounts/hooks/use-submission'
 import { usePageTitle } from '../../use-page-title'
 
@@ -17,7 +17,7 @@ export default function ForgottenPasswordRoute() {
   const [problem, setProblem] = useState<string | null>(null)
   const [sentTo, setSentTo] = useState<string | null>(null)
   const { isBusy, error, submit } = useSubmission()
-  const { fields, form } = authErrors(error)
+  const { fields, form } = formErrors(error, ['email'])
 
   const onSubmit = async (event: FormEvent) => {
     event.preventDefault()

@@ -5,8 +5,8 @@ import { Button, buttonClasses } from '@/components/button'
 import { PasswordField } from '@/components/password-field'
 import { paths } from '@/config/paths'
 import { resetPassword } from '@/features/accounts/api/auth-endpoints'
-import { authErrors } from '@/features/accounts/auth-messages'
 import { MIN_PASSWORD_LENGTH, newPasswordProblem } from '@/features/accounts/field-rules'
+import { formErrors } from '@/features/accounts/form-errors'
 import { useSubmission } from '@/features/accounts/hooks/use-submission'
 import { usePageTitle } from '../../use-page-title'
 
@@ -18,7 +18,7 @@ export default function ResetPasswordRoute() {
   const [problem, setProblem] = useState<string | null>(null)
   const [isDone, setIsDone] = useState(false)
   const { isBusy, error, submit } = useSubmission()
-  const { fields, form } = authErrors(error)
+  const { fields, form } = formErrors(error, ['newPassword'])
 
   const onSubmit = async (event: FormEvent) => {
     event.preventDefault()
@@ -27,7 +27,7 @@ export default function ResetPasswordRoute() {
     if (!found && token) setIsDone(await submit(() => resetPassword(token, password)))
   }
 
-  if (!token || search.get('error'))
+  if (!token)
     return (
       <div className="grid gap-5">
         <h1 className="text-3xl font-extrabold tracking-tight">This link does not work</h1>
@@ -63,7 +63,7 @@ export default function ResetPasswordRoute() {
         hint={`At least ${MIN_PASSWORD_LENGTH} characters.`}
         autoComplete="new-password"
         value={password}
-        error={problem ?? fields.password}
+        error={problem ?? fields.newPassword}
         onChange={(event) => setPassword(event.target.value)}
       />
       <Button type="submit" variant="primary" isBusy={isBusy} className="w-fit">

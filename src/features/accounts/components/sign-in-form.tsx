@@ -5,9 +5,10 @@ import { Button } from '@/components/button'
 import { PasswordField } from '@/components/password-field'
 import { TextField } from '@/components/text-field'
 import { paths } from '@/config/paths'
+import { HttpError } from '@/lib/http-client'
 import { signIn } from '../api/auth-endpoints'
-import { authErrors, isEmailUnconfirmed } from '../auth-messages'
 import { emailProblem } from '../field-rules'
+import { formErrors } from '../form-errors'
 import { useSubmission } from '../hooks/use-submission'
 import { ResendConfirmation } from './resend-confirmation'
 
@@ -16,7 +17,10 @@ export function SignInForm({ next, onSignedIn }: { next: string | null; onSigned
   const [password, setPassword] = useState('')
   const [problems, setProblems] = useState<{ email?: string | null; password?: string | null }>({})
   const { isBusy, error, submit } = useSubmission()
-  const { fields, form } = authErrors(error)
+  const { fields, form } = formErrors(error, ['email', 'password'])
+
+  // The server says so only to whoever knows the password.
+  const isUnconfirmed = error instanceof HttpError && error.status === 403
 
   const onSubmit = async (event: FormEvent) => {
     event.preventDefault()
@@ -28,7 +32,7 @@ export function SignInForm({ next, onSignedIn }: { next: string | null; onSigned
 
   return (
     <form noValidate className="grid gap-5" onSubmit={(event) => void onSubmit(event)}>
-      {isEmailUnconfirmed(error) ? (
+      {isUnconfirmed ? (
         <Banner tone="straw" title="Confirm your e-mail address first">
           <p>The link is in the mail we sent to {email}.</p>
           <ResendConfirmation email={email.trim()} next={next} />

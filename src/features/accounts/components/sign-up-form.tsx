@@ -4,8 +4,8 @@ import { Button } from '@/components/button'
 import { PasswordField } from '@/components/password-field'
 import { TextField } from '@/components/text-field'
 import { signUp } from '../api/auth-endpoints'
-import { authErrors } from '../auth-messages'
 import { emailProblem, MIN_PASSWORD_LENGTH, nameProblem, newPasswordProblem } from '../field-rules'
+import { formErrors } from '../form-errors'
 import { useSubmission } from '../hooks/use-submission'
 
 export function SignUpForm({
@@ -20,7 +20,7 @@ export function SignUpForm({
   const [values, setValues] = useState({ name: '', email: initialEmail, password: '' })
   const [problems, setProblems] = useState<Partial<Record<keyof typeof values, string | null>>>({})
   const { isBusy, error, submit } = useSubmission()
-  const { fields, form } = authErrors(error)
+  const { fields, form } = formErrors(error, ['name', 'email', 'password'])
   const set = (change: Partial<typeof values>) => setValues({ ...values, ...change })
 
   const onSubmit = async (event: FormEvent) => {
@@ -33,7 +33,8 @@ export function SignUpForm({
     setProblems(found)
     if (found.name || found.email || found.password) return
     const email = values.email.trim()
-    if (await submit(() => signUp(values.name.trim(), email, values.password, next))) onSignedUp(email)
+    if (await submit(() => signUp({ name: values.name.trim(), email, password: values.password }, next)))
+      onSignedUp(email)
   }
 
   return (

@@ -1,0 +1,22 @@
+/** Times for people, in their language's order and this device's time zone. */
+
+const MINUTE_S = 60
+const HOUR_S = 3_600
+const DAY_S = 86_400
+const absolute = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium', timeStyle: 'short' })
+const dateOnly = new Intl.DateTimeFormat('en-GB', { dateStyle: 'medium' })
+const relative = new Intl.RelativeTimeFormat('en-GB', { numeric: 'auto' })
+
+export const formatDateTime = (iso: string): string => absolute.format(new Date(iso))
+
+export const formatDate = (iso: string): string => dateOnly.format(new Date(iso))
+
+/** "just now", "5 minutes ago", "yesterday"; a date once that is easier to place. */
+export function formatAgo(iso: string, now: number = Date.now()): string {
+  const seconds = Math.round((now - Date.parse(iso)) / 1_000)
+  if (seconds < MINUTE_S) return 'just now'
+  if (seconds < HOUR_S) return relative.format(-Math.floor(seconds / MINUTE_S), 'minute')
+  if (seconds < DAY_S) return relative.format(-Math.floor(seconds / HOUR_S), 'hour')
+  if (seconds < 14 * DAY_S) return relative.format(-Math.floor(seconds / DAY_S), 'day')
+  return formatDate(iso)
+}
