@@ -258,7 +258,14 @@ const SERVER_ZONES: Zone[] = [
   {
     name: 'server repositories',
     files: ['server/**/*.repository'],
-    mayImport: ['server/database/**', 'server/**/*.table', 'server/**/*.repository', 'shared/**'],
+    // `x-storage` is the interface that a repository implements for its service.
+    mayImport: [
+      'server/database/**',
+      'server/**/*.table',
+      'server/**/*.repository',
+      'server/**/*-storage',
+      'shared/**',
+    ],
     never: ['shared/engineering/**'],
     packages: SQL_PACKAGES,
     mayUseNode: true,

@@ -98,11 +98,15 @@ export function exportedNames(file: SourceFile): ExportedName[] {
   })
 }
 
-/** A file that does nothing but pass on what other files export. */
+/** A file that does nothing but pass on what other files of ours export. Choosing from a package is work. */
 export function isBarrel(file: SourceFile): boolean {
   const tree = ts.createSourceFile(file.path, file.text, ts.ScriptTarget.Latest, false, ts.ScriptKind.TSX)
+  const passesOn = (node: ts.ExportDeclaration) =>
+    !node.moduleSpecifier ||
+    (ts.isStringLiteral(node.moduleSpecifier) &&
+      resolveSpecifier(file.path, node.moduleSpecifier.text).kind === 'project')
   return (
-    tree.statements.some(ts.isExportDeclaration) &&
+    tree.statements.some((node) => ts.isExportDeclaration(node) && passesOn(node)) &&
     tree.statements.every((node) => ts.isImportDeclaration(node) || ts.isExportDeclaration(node))
   )
 }
