@@ -50,7 +50,7 @@ describe('the text of the project', () => {
     ['a home folder', word('(^|[\\s"\'`(])/(home|Users)/', '[a-z]')],
     ['a folder of one machine', word('(^|[\\s"\'`(])/(work', '|root)/')],
     ['unfinished work', word('\\b(TO', 'DO|FIX', 'ME|XX', 'X)\\b|coming', ' soon|lor', 'em ipsum')],
-    ['a skipped or focused test', word('\\b(it|test|describe)\\.', '(skip|only|todo|fixme)\\b')],
+    ['a skipped or focused test', word('\\b(it|test|describe)\\.', '(skip|only|to', 'do|fix', 'me)\\b')],
     ['a silenced type check', word('@ts-', '(ignore|nocheck)')],
   ])('does not name %s', (_what, pattern) => {
     const hits = texts.flatMap(({ path, text }) =>
