@@ -2,11 +2,13 @@ import { useId } from 'react'
 import { classNames } from '@/components/class-names'
 import { Icon } from '@/components/icon'
 import { EditorsBadge } from './editors-badge'
-import { type FieldAddress, useLayoutField } from './layout-field'
+import { type FieldAddress, shownValues, useLayoutField } from './layout-field'
 
 export interface Choice {
   value: string
   label: string
+  /** Heading it stands under. */
+  group?: string
 }
 
 interface LayoutChoiceFieldProps {
@@ -33,7 +35,7 @@ export function LayoutChoiceField({
 }: LayoutChoiceFieldProps) {
   const id = useId()
   const field = useLayoutField(address)
-  const values = new Set(address.targets.map(({ value }) => fromStored(value)))
+  const values = new Set(shownValues(address).map(fromStored))
   const [only = ''] = values
   const isMixed = values.size > 1
   const isKnown = !isMixed && options.some(({ value }) => value === only)
@@ -74,11 +76,7 @@ export function LayoutChoiceField({
           onChange={(event) => field.commit(toStored(event.target.value))}
         >
           {!isKnown && <option value="">{isMixed ? 'several' : only}</option>}
-          {options.map(({ value, label: text }) => (
-            <option key={value} value={value}>
-              {text}
-            </option>
-          ))}
+          <GroupedOptions options={options} />
         </select>
         {!field.isReadOnly && (
           <Icon name="chevronDown" className="pointer-events-none absolute right-1.5 size-3 text-quiet" />
@@ -86,4 +84,25 @@ export function LayoutChoiceField({
       </span>
     </div>
   )
+}
+
+/** Options as they are, then those with a heading under it. */
+export function GroupedOptions({ options }: { options: readonly Choice[] }) {
+  const groups = [...new Set(options.map(({ group }) => group))]
+  return groups.map((group) => {
+    const entries = options
+      .filter((option) => option.group === group)
+      .map(({ value, label }) => (
+        <option key={value} value={value}>
+          {label}
+        </option>
+      ))
+    return group === undefined ? (
+      entries
+    ) : (
+      <optgroup key={group} label={group}>
+        {entries}
+      </optgroup>
+    )
+  })
 }

@@ -20,6 +20,8 @@ export interface FieldAddress {
   label: string
   targets: readonly FieldTarget[]
   field: string
+  /** One entry of a value that is set whole: `yieldMPa` inside `material`, `hole` inside `fit`. */
+  inside?: string
 }
 
 export interface LayoutField {
@@ -51,14 +53,37 @@ export function presenceKey(target: Target, field: string): string {
 }
 
 /** Sets one field of each target. */
-export function setOperations(targets: readonly FieldTarget[], field: string, value: unknown): Operation[] {
+export function setOperations(
+  { targets, field, inside }: Omit<FieldAddress, 'label'>,
+  value: unknown,
+): Operation[] {
   return targets.map(({ target, value: before }) => ({
     type: 'set',
     target,
     field,
     before: before ?? null,
-    value: value ?? null,
+    value: (inside === undefined ? value : withEntry(before, inside, value)) ?? null,
   }))
+}
+
+/** What the field shows for each target. */
+export function shownValues({ targets, inside }: Pick<FieldAddress, 'targets' | 'inside'>): unknown[] {
+  return targets.map(({ value }) =>
+    inside === undefined
+      ? value
+      : typeof value === 'object' && value !== null
+        ? entriesOf(value)[inside]
+        : undefined,
+  )
+}
+
+const entriesOf = (value: object): Record<string, unknown> => ({ ...value })
+
+function withEntry(whole: unknown, inside: string, value: unknown): Record<string, unknown> {
+  const entries = typeof whole === 'object' && whole !== null ? entriesOf(whole) : {}
+  if (value === null || value === undefined) delete entries[inside]
+  else entries[inside] = value
+  return entries
 }
 
 /** Plain words for a commit that did not go through, null for one that did. */
@@ -77,11 +102,14 @@ export function commitProblem(result: CommitResult): string | null {
   }
 }
 
-export function useLayoutField({ label, targets, field }: FieldAddress): LayoutField {
+export function useLayoutField(address: FieldAddress): LayoutField {
+  const { label, targets, field, inside } = address
   const session = useLayoutSession()
   const layoutId = useLayoutStore((state) => state.layoutId)
   const canEdit = useLayoutStore((state) => state.access?.canEdit ?? false)
-  const keys = targets.map(({ target }) => presenceKey(target, field))
+  const keys = targets.map(({ target }) =>
+    presenceKey(target, inside === undefined ? field : `${field}.${inside}`),
+  )
   const editors = useLayoutStore(
     useShallow((state) =>
       state.people
@@ -102,10 +130,10 @@ export function useLayoutField({ label, targets, field }: FieldAddress): LayoutF
     draftKey: `${layoutId}:${keys.join('|')}`,
     preview: (value) => {
       seen.current ??= targets
-      session.setPreview(label, setOperations(seen.current, field, value))
+      session.setPreview(label, setOperations({ ...address, targets: seen.current }, value))
     },
     commit: (value) => {
-      const operations = setOperations(seen.current ?? targets, field, value)
+      const operations = setOperations({ ...address, targets: seen.current ?? targets }, value)
       seen.current = null
       return commitProblem(session.commit(label, operations))
     },

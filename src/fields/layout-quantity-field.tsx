@@ -1,6 +1,6 @@
 import { QuantityField, type QuantityFieldProps } from '@/components/quantity-field'
 import { EditorsBadge } from './editors-badge'
-import { type FieldAddress, useLayoutField } from './layout-field'
+import { type FieldAddress, shownValues, useLayoutField } from './layout-field'
 
 interface LayoutQuantityFieldProps extends Omit<
   QuantityFieldProps,
@@ -12,7 +12,7 @@ interface LayoutQuantityFieldProps extends Omit<
 /** A quantity of the layout. With several targets it shows their common value, or that they differ. */
 export function LayoutQuantityField({ address, placeholder, ...rest }: LayoutQuantityFieldProps) {
   const field = useLayoutField(address)
-  const values = new Set(address.targets.map(({ value }) => value ?? null))
+  const values = new Set(shownValues(address).map((value) => value ?? null))
   const [only] = values
   const isMixed = values.size > 1
   return (

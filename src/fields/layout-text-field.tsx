@@ -3,7 +3,7 @@ import { classNames } from '@/components/class-names'
 import { Icon } from '@/components/icon'
 import { keepDraft, keptDraft } from '@/components/kept-drafts'
 import { EditorsBadge } from './editors-badge'
-import { type FieldAddress, useLayoutField } from './layout-field'
+import { type FieldAddress, shownValues, useLayoutField } from './layout-field'
 
 interface LayoutTextFieldProps {
   label: string
@@ -33,7 +33,7 @@ export function LayoutTextField({
   const field = useLayoutField(address)
   const [draft, setDraft] = useState<string | null>(() => keptDraft(field.draftKey)?.text ?? null)
   const [message, setMessage] = useState<string | null>(() => keptDraft(field.draftKey)?.message ?? null)
-  const values = new Set(address.targets.map(({ value }) => (typeof value === 'string' ? value : '')))
+  const values = new Set(shownValues(address).map((value) => (typeof value === 'string' ? value : '')))
   const [only = ''] = values
   const stored = values.size > 1 ? '' : only
 
