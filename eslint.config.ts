@@ -45,6 +45,9 @@ export default tseslint.config(
       '@typescript-eslint/no-misused-promises': ['error', { checksVoidReturn: { attributes: false } }],
       // An async function without await is how a synchronous implementation meets an async interface.
       '@typescript-eslint/require-await': 'off',
+      // Branded quantities are numbers; so are unions that name their usual members.
+      '@typescript-eslint/no-unsafe-unary-minus': 'off',
+      '@typescript-eslint/no-redundant-type-constituents': 'off',
     },
   },
   {
