@@ -1,4 +1,4 @@
-import { useId } from 'react'
+import { useId, useState } from 'react'
 import { classNames } from '@/components/class-names'
 import { Icon } from '@/components/icon'
 import { EditorsBadge } from './editors-badge'
@@ -20,6 +20,8 @@ interface LayoutChoiceFieldProps {
   toStored?: (value: string) => unknown
   /** From what is stored to an option. */
   fromStored?: (value: unknown) => string
+  /** Shown while closed instead of the option's text, which may be long. */
+  shown?: string
   className?: string
 }
 
@@ -31,10 +33,12 @@ export function LayoutChoiceField({
   arrangement = 'stacked',
   toStored = (value) => value,
   fromStored = (value) => (typeof value === 'string' ? value : ''),
+  shown,
   className,
 }: LayoutChoiceFieldProps) {
   const id = useId()
   const field = useLayoutField(address)
+  const [message, setMessage] = useState<string | null>(null)
   const values = new Set(shownValues(address).map(fromStored))
   const [only = ''] = values
   const isMixed = values.size > 1
@@ -70,18 +74,35 @@ export function LayoutChoiceField({
           id={id}
           disabled={field.isReadOnly}
           value={isKnown ? only : ''}
-          className="w-full min-w-0 appearance-none bg-transparent py-1 pr-6 pl-2 text-sm font-semibold outline-none disabled:text-ink disabled:opacity-100"
+          aria-invalid={message !== null || undefined}
+          aria-describedby={message === null ? undefined : `${id}-error`}
+          className={classNames(
+            'w-full min-w-0 appearance-none truncate bg-transparent py-1 pr-6 pl-2 text-sm font-semibold outline-none disabled:opacity-100',
+            shown === undefined
+              ? 'disabled:text-ink'
+              : 'text-transparent [&_optgroup]:bg-card [&_optgroup]:text-quiet [&_option]:bg-card [&_option]:text-ink',
+          )}
           onFocus={() => field.setFocused(true)}
           onBlur={() => field.setFocused(false)}
-          onChange={(event) => field.commit(toStored(event.target.value))}
+          onChange={(event) => setMessage(field.commit(toStored(event.target.value)))}
         >
           {!isKnown && <option value="">{isMixed ? 'several' : only}</option>}
           <GroupedOptions options={options} />
         </select>
+        {shown !== undefined && (
+          <span aria-hidden="true" className="pointer-events-none absolute left-2 text-sm font-semibold">
+            {isMixed ? 'several' : shown}
+          </span>
+        )}
         {!field.isReadOnly && (
           <Icon name="chevronDown" className="pointer-events-none absolute right-1.5 size-3 text-quiet" />
         )}
       </span>
+      {message !== null && (
+        <p id={`${id}-error`} role="alert" className="col-span-2 text-xs font-medium text-bad">
+          {message}
+        </p>
+      )}
     </div>
   )
 }

@@ -1,0 +1,269 @@
+/** The calculated numbers of one hub, grouped the way one judges a fit. */
+import { formatResult, formatResultPair } from '@/lib/format-quantity'
+import type { UnitSystem } from '@/lib/quantity-units'
+import { useResultsStore } from '@/stores/results-store'
+import { extreme } from '@/stores/shown-load-case'
+import { findLibraryMaterial } from '@shared/engineering/materials/material-library'
+import type { Criteria, Hub } from '@shared/layout/layout-document'
+import type { HubCaseQuantity, HubQuantity, QuantityReference } from '@shared/recalculation/derivation'
+import type { HubLoadCaseResult, HubResult } from '@shared/recalculation/layout-results'
+import { ResultRow } from './inspector-parts'
+
+interface Shown {
+  result: HubResult
+  shown: HubLoadCaseResult
+  units: UnitSystem
+}
+
+const ofHub = (hub: string, quantity: HubQuantity): QuantityReference => ({ kind: 'hub', hub, quantity })
+const inCase = (
+  hub: string,
+  { loadCase }: HubLoadCaseResult,
+  quantity: HubCaseQuantity,
+): QuantityReference => ({
+  kind: 'hubCase',
+  hub,
+  loadCase,
+  quantity,
+})
+
+export function FitResults({
+  result,
+  shown,
+  units,
+}: {
+  result: HubResult
+  shown: HubLoadCaseResult | null
+  units: UnitSystem
+}) {
+  const { interference, id } = result
+  const pair = (min: number | null, max: number | null) =>
+    formatResultPair(min, max, 'interference', units, ' … ').text
+  const less = (um: number | null) => (um === null ? null : um - (interference.embeddingLossUm ?? 0))
+  return (
+    <div className="mt-1.5">
+      <ResultRow
+        label="Interference, diametral"
+        value={pair(interference.minUm, interference.maxUm)}
+        reference={ofHub(id, 'interferenceMin')}
+      />
+      <ResultRow
+        label={`less ${formatResult(interference.embeddingLossUm, 'interference', units).text} embedding`}
+        name="embedding loss"
+        value={pair(less(interference.minUm), less(interference.maxUm))}
+        reference={ofHub(id, 'embeddingLoss')}
+      />
+      {shown !== null && (
+        <>
+          {shown.thermalChangeUm !== null && Math.abs(shown.thermalChangeUm) >= 0.05 && (
+            <ResultRow
+              label="Change by temperature"
+              value={signed(shown.thermalChangeUm, units)}
+              reference={inCase(id, shown, 'thermalChange')}
+            />
+          )}
+          {shown.speedLossUm !== null && Math.abs(shown.speedLossUm) >= 0.05 && (
+            <ResultRow
+              label="Loss by speed"
+              value={signed(-Math.abs(shown.speedLossUm), units)}
+              reference={inCase(id, shown, 'speedLoss')}
+            />
+          )}
+          <ResultRow
+            label="Effective in service"
+            value={pair(shown.effectiveMinUm, shown.effectiveMaxUm)}
+            reference={inCase(id, shown, 'effectiveMin')}
+          />
+        </>
+      )}
+    </div>
+  )
+}
+
+const signed = (um: number, units: UnitSystem) =>
+  (um > 0 ? '+' : '') + formatResult(um, 'interference', units).text
+
+export function GripResults({ result, shown, units }: Shown) {
+  const { id } = result
+  const limit = shown.slipSafetyLimit
+  return (
+    <>
+      <ResultRow
+        label="Interface pressure"
+        value={formatResult(shown.pressureMinMPa, 'stress', units).text}
+        reference={inCase(id, shown, 'pressureMin')}
+      />
+      <ResultRow
+        label="Torque capacity / required"
+        value={formatResultPair(shown.torqueCapacityNm, shown.requiredTorqueNm, 'torque', units).text}
+        reference={inCase(id, shown, 'torqueCapacity')}
+        safety={{ value: shown.torqueSafety, limit, reference: inCase(id, shown, 'torqueSafety') }}
+      />
+      <ResultRow
+        label="Axial capacity / required"
+        value={formatResultPair(shown.axialCapacityN, shown.requiredAxialN, 'force', units).text}
+        reference={inCase(id, shown, 'axialCapacity')}
+        safety={{ value: shown.axialSafety, limit, reference: inCase(id, shown, 'axialSafety') }}
+      />
+      <ResultRow
+        label={`Combined slip safety, needs ${limit}`}
+        name="combined slip safety"
+        value=""
+        safety={{ value: shown.slipSafety, limit, reference: inCase(id, shown, 'slipSafety') }}
+      />
+    </>
+  )
+}
+
+export function StressResults({
+  hub,
+  result,
+  shown,
+  criteria,
+  units,
+}: Shown & { hub: Hub; criteria: Criteria }) {
+  const { id, atRest } = result
+  const isBrittle =
+    typeof hub.material === 'string'
+      ? (findLibraryMaterial(hub.material)?.isBrittle ?? false)
+      : hub.material.brittle
+  const hubLimit = isBrittle ? criteria.brittleSafety : criteria.hubYieldSafety
+  const notches = useResultsStore(
+    (state) => state.results?.shaft.loadCases.find(({ loadCase }) => loadCase === shown.loadCase)?.notches,
+  )
+  const edge = extreme(
+    notches?.filter(({ part, kind }) => part === id && kind === 'seatEdge') ?? [],
+    ({ fatigueSafety }) => fatigueSafety,
+    'least',
+  )
+  const stress = (value: number | null) => formatResult(value, 'stress', units).text
+  return (
+    <>
+      <ResultRow
+        label="Interface pressure"
+        value={stress(shown.pressureMaxMPa)}
+        reference={inCase(id, shown, 'pressureMax')}
+      />
+      <ResultRow
+        label="Hub bore, hoop"
+        value={stress(shown.hubHoopMaxMPa)}
+        reference={inCase(id, shown, 'hubHoopMax')}
+      />
+      <ResultRow
+        label={isBrittle ? 'Hub bore, brittle' : 'Hub bore, equivalent'}
+        value={stress(shown.hubEquivalentMaxMPa)}
+        reference={inCase(id, shown, 'hubEquivalentMax')}
+        safety={{
+          value: shown.hubYieldSafety,
+          limit: hubLimit,
+          reference: inCase(id, shown, 'hubYieldSafety'),
+        }}
+      />
+      <ResultRow
+        label="Hub bore, at rest and 20 °C"
+        value={stress(atRest.hubEquivalentMaxMPa)}
+        reference={ofHub(id, 'hubEquivalentAtRest')}
+        safety={{
+          value: atRest.hubYieldSafety,
+          limit: hubLimit,
+          reference: ofHub(id, 'hubYieldSafetyAtRest'),
+        }}
+      />
+      <ResultRow
+        label="Shaft under the seat"
+        value={stress(shown.shaftEquivalentMaxMPa)}
+        reference={inCase(id, shown, 'shaftEquivalentMax')}
+        safety={{
+          value: shown.shaftYieldSafety,
+          limit: criteria.shaftYieldSafety,
+          reference: inCase(id, shown, 'shaftYieldSafety'),
+        }}
+      />
+      {edge !== null && (
+        <ResultRow
+          label={
+            <>
+              Shaft at seat edge, fatigue, K<sub>f</sub> {edge.fatigueNotchFactor.toFixed(1)}
+            </>
+          }
+          name="shaft fatigue at the seat edge"
+          value=""
+          safety={{
+            value: edge.fatigueSafety,
+            limit: criteria.fatigueSafety,
+            reference: {
+              kind: 'shaftCase',
+              loadCase: shown.loadCase,
+              quantity: 'fatigueSafety',
+              stationMm: edge.stationMm,
+            },
+          }}
+        />
+      )}
+      <ResultRow
+        label="Outer diameter grows by"
+        value={
+          formatResultPair(
+            result.outerDiameterGrowthUm.min,
+            result.outerDiameterGrowthUm.max,
+            'interference',
+            units,
+            ' … ',
+          ).text
+        }
+        reference={ofHub(id, 'outerDiameterGrowth')}
+      />
+    </>
+  )
+}
+
+const ordinal = (place: number) =>
+  `${place}${['th', 'st', 'nd', 'rd'][place % 100 > 10 && place % 100 < 14 ? 0 : place % 10] ?? 'th'}`
+
+export function JoiningResults({ hub, result, units }: { hub: Hub; result: HubResult; units: UnitSystem }) {
+  const { assembly, id } = result
+  const temperature = (value: number | null) => formatResult(value, 'temperature', units).text
+  const overLimit =
+    assembly.joiningC !== null && assembly.limitC !== null && assembly.joiningC > assembly.limitC
+  return (
+    <div className="mb-1.5">
+      {hub.joining.method === 'press' ? (
+        <ResultRow
+          label="Press force, at most"
+          value={formatResult(assembly.pressForceMaxN, 'force', units).text}
+          reference={ofHub(id, 'pressForce')}
+        />
+      ) : (
+        <>
+          <ResultRow
+            label="Hub joins at"
+            value={temperature(assembly.joiningC)}
+            reference={ofHub(id, 'joiningTemperature')}
+          />
+          <ResultRow
+            label="Oven at"
+            value={temperature(assembly.ovenC)}
+            reference={ofHub(id, 'ovenTemperature')}
+          />
+          <ResultRow
+            label="Limit"
+            value={`${overLimit ? '✕ exceeded, ' : ''}${temperature(assembly.limitC)}`}
+          />
+          <ResultRow
+            label="Press force if cold"
+            value={formatResult(assembly.pressForceMaxN, 'force', units).text}
+            reference={ofHub(id, 'pressForce')}
+          />
+        </>
+      )}
+      <ResultRow
+        label="Order and side"
+        value={
+          assembly.order === null
+            ? '✕ cannot be mounted'
+            : `${ordinal(assembly.order)}, from the ${assembly.side}`
+        }
+      />
+    </div>
+  )
+}

@@ -1,0 +1,110 @@
+import { LayoutQuantityField } from '@/fields/layout-quantity-field'
+import { LayoutTextField } from '@/fields/layout-text-field'
+import { criteriaAddress } from '@/fields/part-address'
+import { formatGiven } from '@/lib/format-quantity'
+import type { QuantityKind, UnitSystem } from '@/lib/quantity-units'
+import { useResultsStore } from '@/stores/results-store'
+import type { Criteria, LayoutDocument } from '@shared/layout/layout-document'
+import { totalLengthMm } from '@shared/layout/shaft-geometry'
+import { EditingNow } from './editing-now'
+import { FieldGrid, Group } from './inspector-parts'
+import { MaterialFields } from './material-fields'
+
+interface CriterionField {
+  field: keyof Criteria
+  label: string
+  kind: QuantityKind
+  isOptional?: boolean
+  minIsZero?: boolean
+  max: number
+}
+
+export const CRITERIA_FIELDS: readonly CriterionField[] = [
+  { field: 'slipSafety', label: 'Slip safety', kind: 'ratio', max: 100 },
+  { field: 'hubYieldSafety', label: 'Hub yield safety', kind: 'ratio', max: 100 },
+  { field: 'brittleSafety', label: 'Brittle hub safety', kind: 'ratio', max: 100 },
+  { field: 'shaftYieldSafety', label: 'Shaft yield safety', kind: 'ratio', max: 100 },
+  { field: 'fatigueSafety', label: 'Fatigue safety', kind: 'ratio', max: 100 },
+  { field: 'meshSlopeMrad', label: 'Slope at gears', kind: 'slope', max: 1_000 },
+  { field: 'bearingSlopeMrad', label: 'Slope at bearings', kind: 'slope', max: 1_000 },
+  {
+    field: 'meshDeflectionUm',
+    label: 'Deflection at gears',
+    kind: 'interference',
+    isOptional: true,
+    max: 1e6,
+  },
+  { field: 'minGapMm', label: 'Gap between parts', kind: 'length', minIsZero: true, max: 10_000 },
+  { field: 'minLengthToDiameter', label: 'Length to diameter', kind: 'ratio', minIsZero: true, max: 100 },
+]
+
+/** Nothing selected: the layout itself. */
+export function LayoutInspector({ layout, units }: { layout: LayoutDocument; units: UnitSystem }) {
+  const findings = useResultsStore((state) => state.results?.findings)
+  const count = (severity: string) => findings?.filter((finding) => finding.severity === severity).length ?? 0
+  const facts = [
+    `${layout.hubs.length} ${layout.hubs.length === 1 ? 'hub' : 'hubs'}`,
+    `${layout.bearings.length} ${layout.bearings.length === 1 ? 'bearing' : 'bearings'}`,
+    `${layout.shaft.sections.length} ${layout.shaft.sections.length === 1 ? 'section' : 'sections'}`,
+    `${formatGiven(Number(totalLengthMm(layout).toFixed(3)), 'length', units).text} long`,
+    `${layout.loadCases.length} ${layout.loadCases.length === 1 ? 'load case' : 'load cases'}`,
+  ]
+  return (
+    <>
+      <header>
+        <LayoutTextField
+          label="Name of the layout"
+          arrangement="title"
+          address={{
+            label: 'Rename the layout',
+            field: 'name',
+            targets: [{ target: { kind: 'layout' }, value: layout.name }],
+          }}
+        />
+        <p className="text-[13px] text-quiet">{facts.join(', ')}</p>
+        {findings !== undefined && (
+          <p className="mt-1 text-[13px]">
+            <span className={count('fails') > 0 ? 'font-semibold text-bad' : ''}>
+              {count('fails') > 0 && <span aria-hidden="true">✕ </span>}
+              {count('fails')} fail
+            </span>
+            , {count('warns')} warn, {count('notes')} note
+          </p>
+        )}
+      </header>
+      <Group title="Shaft material">
+        <EditingNow partKey="shaft:" />
+        <MaterialFields
+          label="Material of the shaft"
+          units={units}
+          material={layout.shaft.material}
+          address={{
+            label: 'Change the shaft material',
+            field: 'material',
+            targets: [{ target: { kind: 'shaft' }, value: layout.shaft.material }],
+          }}
+        />
+      </Group>
+      <Group title="Acceptance criteria" note="least or most allowed">
+        <FieldGrid>
+          {CRITERIA_FIELDS.map(({ field, label, kind, isOptional, minIsZero, max }) => (
+            <LayoutQuantityField
+              key={field}
+              label={label}
+              kind={kind}
+              address={criteriaAddress(layout.criteria, field)}
+              isOptional={isOptional}
+              placeholder={isOptional ? 'not judged' : undefined}
+              min={0}
+              isMinExclusive={minIsZero !== true}
+              max={max}
+            />
+          ))}
+        </FieldGrid>
+      </Group>
+      <p className="mt-4 text-xs text-quiet">
+        Select a part on the drawing or in the schedule to see and change it here.
+      </p>
+    </>
+  )
+}
