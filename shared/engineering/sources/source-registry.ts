@@ -186,6 +186,35 @@ export const SOURCE_REGISTRY = [
     clauses: 'statics, torsion and natural frequencies of stepped shafts',
     isFromMemory: false,
   },
+  {
+    id: 'finite-elements',
+    citation: 'Linear finite-element method for axisymmetric solids, as in any text on the method',
+    edition: 'common practice',
+    clauses: 'four-node ring element, thermal and centrifugal nodal forces, unit load superposition',
+    isFromMemory: true,
+  },
+  {
+    id: 'hughes-b-bar',
+    citation:
+      'T. J. R. Hughes, Generalization of selective integration procedures to anisotropic and nonlinear media, Int. J. Numer. Meth. Engng 15 (1980)',
+    edition: '1980',
+    clauses: 'mean dilatation (B-bar) four-node element',
+    isFromMemory: true,
+  },
+  {
+    id: 'george-liu-envelope',
+    citation: 'A. George, J. W. H. Liu, Computer Solution of Large Sparse Positive Definite Systems',
+    edition: '1981',
+    clauses: 'chapter 4: envelope methods',
+    isFromMemory: true,
+  },
+  {
+    id: 'kikuchi-oden',
+    citation: 'N. Kikuchi, J. T. Oden, Contact Problems in Elasticity, SIAM',
+    edition: '1988',
+    clauses: 'unilateral contact as complementarity; Coulomb friction under proportional loading',
+    isFromMemory: true,
+  },
 ] as const satisfies readonly Source[]
 
 export type SourceId = (typeof SOURCE_REGISTRY)[number]['id']
