@@ -7,7 +7,7 @@ import { paths } from '@/config/paths'
 import { requestPasswordReset } from '@/features/accounts/api/auth-endpoints'
 import { CaughtMailHint } from '@/features/accounts/components/caught-mail-hint'
 import { emailProblem } from '@/features/accounts/field-rules'
-import { formErrors } from '@/features/accounts/form-errors'
+import { formErrors } from '@/lib/form-errors'
 import { useSubmission } from '@/features/accounts/hooks/use-submission'
 import { usePageTitle } from '../../use-page-title'
 

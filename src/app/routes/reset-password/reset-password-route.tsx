@@ -6,7 +6,7 @@ import { PasswordField } from '@/components/password-field'
 import { paths } from '@/config/paths'
 import { resetPassword } from '@/features/accounts/api/auth-endpoints'
 import { MIN_PASSWORD_LENGTH, newPasswordProblem } from '@/features/accounts/field-rules'
-import { formErrors } from '@/features/accounts/form-errors'
+import { formErrors } from '@/lib/form-errors'
 import { useSubmission } from '@/features/accounts/hooks/use-submission'
 import { usePageTitle } from '../../use-page-title'
 

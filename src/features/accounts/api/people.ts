@@ -19,7 +19,12 @@ function usePeopleMutation<Variables, Answer>(
   const queryClient = useQueryClient()
   return useMutation({
     mutationFn: send,
-    onSettled: () => queryClient.invalidateQueries({ queryKey: queryKeys.people(workspaceId) }),
+    onSettled: () =>
+      Promise.all([
+        queryClient.invalidateQueries({ queryKey: queryKeys.people(workspaceId) }),
+        // An admin may have changed or removed themselves.
+        queryClient.invalidateQueries({ queryKey: queryKeys.me }),
+      ]),
   })
 }
 

@@ -7,7 +7,7 @@ import { showToast } from '@/components/toast-store'
 import { queryKeys } from '@/lib/query-keys'
 import { changePassword } from '../api/auth-endpoints'
 import { MIN_PASSWORD_LENGTH, newPasswordProblem } from '../field-rules'
-import { formErrors } from '../form-errors'
+import { formErrors } from '@/lib/form-errors'
 import { useSubmission } from '../hooks/use-submission'
 
 export function ChangePasswordForm() {

@@ -2,19 +2,15 @@ import { type FormEvent, useState } from 'react'
 import { Banner } from '@/components/banner'
 import { Button } from '@/components/button'
 import { TextField } from '@/components/text-field'
-import { HttpError, messageOf } from '@/lib/http-client'
+import { formErrors } from '@/lib/form-errors'
 import { useCreateWorkspace } from '../api/create-workspace'
 
 export function CreateWorkspaceForm({ onCreated }: { onCreated: (workspaceId: string) => void }) {
   const [name, setName] = useState('')
   const [isEmptyRefused, setIsEmptyRefused] = useState(false)
   const { mutate, isPending, error } = useCreateWorkspace()
-  const fieldError =
-    isEmptyRefused && !name.trim()
-      ? 'Give the workspace a name'
-      : error instanceof HttpError
-        ? error.fields.name
-        : undefined
+  const { fields, form } = formErrors(error, ['name'])
+  const fieldError = isEmptyRefused && !name.trim() ? 'Give the workspace a name' : fields.name
 
   const submit = (event: FormEvent) => {
     event.preventDefault()
@@ -33,7 +29,7 @@ export function CreateWorkspaceForm({ onCreated }: { onCreated: (workspaceId: st
         error={fieldError}
         onChange={(event) => setName(event.target.value)}
       />
-      {error && !fieldError && <Banner tone="bad">{messageOf(error)}</Banner>}
+      {form && <Banner tone="bad">{form}</Banner>}
       <Button type="submit" variant="primary" isBusy={isPending} className="w-fit">
         Create workspace
       </Button>

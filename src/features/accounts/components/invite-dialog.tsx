@@ -8,7 +8,7 @@ import { showToast } from '@/components/toast-store'
 import { type Role, roleSchema, ROLES } from '@shared/protocol/roles'
 import { useInvite } from '../api/people'
 import { emailProblem } from '../field-rules'
-import { formErrors } from '../form-errors'
+import { formErrors } from '@/lib/form-errors'
 import { ROLE_DESCRIPTIONS, ROLE_NAMES } from '../role-texts'
 
 const options = ROLES.map((role) => ({ value: role, label: ROLE_NAMES[role] }))

@@ -5,7 +5,7 @@ import { TextField } from '@/components/text-field'
 import { showToast } from '@/components/toast-store'
 import { useUpdateName } from '../api/update-name'
 import { nameProblem } from '../field-rules'
-import { formErrors } from '../form-errors'
+import { formErrors } from '@/lib/form-errors'
 
 export function NameForm({ name: storedName, email }: { name: string; email: string }) {
   const [name, setName] = useState(storedName)

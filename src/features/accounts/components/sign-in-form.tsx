@@ -8,7 +8,7 @@ import { paths } from '@/config/paths'
 import { HttpError } from '@/lib/http-client'
 import { signIn } from '../api/auth-endpoints'
 import { emailProblem } from '../field-rules'
-import { formErrors } from '../form-errors'
+import { formErrors } from '@/lib/form-errors'
 import { useSubmission } from '../hooks/use-submission'
 import { ResendConfirmation } from './resend-confirmation'
 

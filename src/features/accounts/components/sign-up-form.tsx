@@ -5,7 +5,7 @@ import { PasswordField } from '@/components/password-field'
 import { TextField } from '@/components/text-field'
 import { signUp } from '../api/auth-endpoints'
 import { emailProblem, MIN_PASSWORD_LENGTH, nameProblem, newPasswordProblem } from '../field-rules'
-import { formErrors } from '../form-errors'
+import { formErrors } from '@/lib/form-errors'
 import { useSubmission } from '../hooks/use-submission'
 
 export function SignUpForm({

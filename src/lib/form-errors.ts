@@ -1,4 +1,4 @@
-import { HttpError, messageOf } from '@/lib/http-client'
+import { HttpError, messageOf } from './http-client'
 
 interface FormErrors<Name extends string> {
   /** Shown at their field. */
