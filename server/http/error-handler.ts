@@ -1,6 +1,7 @@
 import type { ErrorRequestHandler, RequestHandler } from 'express'
 import type { ErrorBody, ErrorCode } from '@shared/protocol/errors'
 import { HttpError, notFound } from './http-error'
+import { TooManyRequests } from './too-many-requests'
 
 /** What the body parsers and the router throw, by their `type` or status. */
 function fromLibrary(error: unknown): HttpError | null {
@@ -44,6 +45,7 @@ export const errorHandler: ErrorRequestHandler = (error: unknown, request, respo
   const known = error instanceof HttpError ? error : fromLibrary(error)
   if (known) {
     if (known.code === 'forbidden') request.log.warn({ code: known.code }, 'refused')
+    if (known instanceof TooManyRequests) response.set('Retry-After', String(known.retryAfterS))
     sendError(response, known)
     return
   }
