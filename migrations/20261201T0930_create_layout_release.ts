@@ -22,6 +22,7 @@ export async function up(db: Kysely<unknown>): Promise<void> {
       document_hash TEXT NOT NULL,
       results TEXT NOT NULL CHECK (json_valid(results)),
       engine_version TEXT NOT NULL,
+      method TEXT NOT NULL CHECK (json_valid(method)),
       verdict TEXT NOT NULL CHECK (verdict IN ('passes', 'fails')),
       acceptances TEXT NOT NULL CHECK (json_valid(acceptances)),
       note TEXT NOT NULL,

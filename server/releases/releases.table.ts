@@ -17,6 +17,8 @@ export interface LayoutReleaseTable {
   document_hash: string
   results: string
   engine_version: string
+  /** What the engine of that day did and did not cover, as printed on the sheet. */
+  method: string
   verdict: 'passes' | 'fails'
   acceptances: string
   note: string

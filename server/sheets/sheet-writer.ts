@@ -1,0 +1,351 @@
+/**
+ * A pen for sheets: everything in millimetres from the top left corner, text by its baseline.
+ * Knows paper, not shafts. Bytes depend on what is written and the date given, nothing else.
+ */
+import PDFDocument from 'pdfkit'
+import { DRAWN_SIGNS, type DrawnSign, type FontWeight, sheetFonts, textRuns } from './sheet-fonts'
+
+export const PT_PER_MM = 72 / 25.4
+/** Share of the letter size from baseline to the top of a capital. */
+const CAP_HEIGHT = 0.72
+const LINE_SPACING = 1.32
+const LOWERED_SIZE = 0.64
+const LOWERED_DROP = 0.14
+
+export const INK = '#1F242C'
+export const QUIET = '#5B6472'
+export const HAIRLINE = '#C9C2B3'
+export const GOOD = '#2E7A5A'
+export const BAD = '#B0392B'
+export const STRAW = '#8A5F10'
+export const STEEL = '#2B4C7E'
+
+/** Line widths of drawing practice: visible edges twice the thin lines (ISO 128, from memory). */
+export const THICK_MM = 0.35
+export const THIN_MM = 0.18
+
+export interface TextStyle {
+  sizePt: number
+  weight?: FontWeight
+  colour?: string
+  align?: 'left' | 'right' | 'centre'
+}
+export interface LineStyle {
+  widthMm?: number
+  colour?: string
+  dashMm?: number[]
+}
+export interface XY {
+  x: number
+  y: number
+}
+
+/** Figures of equal width. Asked for only where there are digits: a text without features is laid out from a cache. */
+const digitFeatures = (text: string): { features?: ['tnum', 'kern'] } =>
+  /\d/.test(text) ? { features: ['tnum', 'kern'] } : {}
+
+export class SheetWriter {
+  private readonly pdf: PDFKit.PDFDocument
+  private readonly ended: Promise<Buffer>
+  private readonly widthsEm = new Map<string, number>()
+
+  constructor(about: { title: string; author: string; subject: string; keywords: string; createdAt: Date }) {
+    this.pdf = new PDFDocument({
+      autoFirstPage: false,
+      bufferPages: true,
+      lang: 'en-GB',
+      displayTitle: true,
+      margin: 0,
+      pdfVersion: '1.7',
+      // The date of the release, so that the same release gives the same bytes at any time.
+      info: {
+        Title: about.title,
+        Author: about.author,
+        Subject: about.subject,
+        Keywords: about.keywords,
+        Creator: 'Hubstead',
+        Producer: 'Hubstead',
+        CreationDate: about.createdAt,
+        ModDate: about.createdAt,
+      },
+    })
+    const chunks: Buffer[] = []
+    this.ended = new Promise((resolve, reject) => {
+      this.pdf.on('data', (chunk: Buffer) => chunks.push(chunk))
+      this.pdf.on('end', () => resolve(Buffer.concat(chunks)))
+      this.pdf.on('error', reject)
+    })
+    const fonts = sheetFonts()
+    for (const font of [...fonts.regular, ...fonts.strong]) this.pdf.registerFont(font.name, font.bytes)
+  }
+
+  addPage(widthMm: number, heightMm: number): void {
+    this.pdf.addPage({ size: [widthMm * PT_PER_MM, heightMm * PT_PER_MM], margin: 0 })
+  }
+
+  get pageCount(): number {
+    return this.pdf.bufferedPageRange().count
+  }
+
+  /** Calls back once per page, in order, with the pen on that page. */
+  forEachPage(write: (index: number, count: number) => void): void {
+    const { start, count } = this.pdf.bufferedPageRange()
+    for (let index = 0; index < count; index += 1) {
+      this.pdf.switchToPage(start + index)
+      write(index, count)
+    }
+  }
+
+  finish(): Promise<Buffer> {
+    this.pdf.end()
+    return this.ended
+  }
+
+  /** Width in millimetres. Widths grow with the size, so each text is laid out once per weight. */
+  measure(text: string, style: TextStyle): number {
+    const weight = style.weight ?? 'regular'
+    const key = `${weight} ${text}`
+    let widthEm = this.widthsEm.get(key)
+    if (widthEm === undefined) {
+      widthEm = 0
+      for (const run of textRuns(text, weight)) {
+        if (run.kind === 'sign') widthEm += DRAWN_SIGNS[run.sign].widthEm
+        else widthEm += this.runWidth(run.text, run.fontName, 100) * (run.isLowered ? LOWERED_SIZE : 1) * 0.01
+      }
+      this.widthsEm.set(key, widthEm)
+    }
+    return (widthEm * style.sizePt) / PT_PER_MM
+  }
+
+  /** One line; `y` is the baseline. */
+  text(text: string, x: number, y: number, style: TextStyle): void {
+    const align = style.align ?? 'left'
+    const shift = align === 'left' ? 0 : this.measure(text, style) * (align === 'right' ? 1 : 0.5)
+    let at = (x - shift) * PT_PER_MM
+    const baseline = y * PT_PER_MM
+    const colour = style.colour ?? INK
+    for (const run of textRuns(text, style.weight ?? 'regular')) {
+      if (run.kind === 'sign') {
+        this.sign(run.sign, at, baseline, style.sizePt, colour)
+        at += DRAWN_SIGNS[run.sign].widthEm * style.sizePt
+        continue
+      }
+      const size = style.sizePt * (run.isLowered ? LOWERED_SIZE : 1)
+      const width = this.runWidth(run.text, run.fontName, size)
+      this.pdf.fillColor(colour)
+      this.pdf.text(run.text, at, baseline + (run.isLowered ? style.sizePt * LOWERED_DROP : 0), {
+        lineBreak: false,
+        baseline: 'alphabetic',
+        ...digitFeatures(run.text),
+      })
+      at += width
+    }
+  }
+
+  /** Reads from bottom to top, as dimensions on a drawing do; (x, y) is the middle of the line. */
+  verticalText(text: string, x: number, y: number, style: TextStyle): void {
+    this.pdf.save()
+    this.pdf.rotate(-90, { origin: [x * PT_PER_MM, y * PT_PER_MM] })
+    this.text(text, x, y + (style.sizePt * CAP_HEIGHT) / 2 / PT_PER_MM, style)
+    this.pdf.restore()
+  }
+
+  /** Breaks at blanks, and inside a word only where the word alone is too long. */
+  wrap(text: string, widthMm: number, style: TextStyle): string[] {
+    const lines: string[] = []
+    const blankMm = this.measure(' ', style)
+    for (const paragraph of text.split('\n')) {
+      let line = ''
+      let lineMm = 0
+      for (const word of paragraph.split(/ +/)) {
+        const wordMm = this.measure(word, style)
+        if (line !== '' && lineMm + blankMm + wordMm <= widthMm) {
+          line = `${line} ${word}`
+          lineMm += blankMm + wordMm
+          continue
+        }
+        if (line !== '') lines.push(line)
+        line = word
+        while (this.measure(line, style) > widthMm && line.length > 1) {
+          const cut = this.longestPrefix(line, widthMm, style)
+          lines.push(line.slice(0, cut))
+          line = line.slice(cut)
+        }
+        lineMm = this.measure(line, style)
+      }
+      lines.push(line)
+    }
+    return lines
+  }
+
+  /** Shortens to one line with an ellipsis; only where the full text stands elsewhere on the sheet. */
+  fit(text: string, widthMm: number, style: TextStyle): string {
+    if (this.measure(text, style) <= widthMm) return text
+    const cut = this.longestPrefix(text, widthMm - this.measure('…', style), style)
+    return `${text.slice(0, cut).trimEnd()}…`
+  }
+
+  lineHeight(style: TextStyle): number {
+    return (style.sizePt * LINE_SPACING) / PT_PER_MM
+  }
+
+  capHeight(style: TextStyle): number {
+    return (style.sizePt * CAP_HEIGHT) / PT_PER_MM
+  }
+
+  /** Writes wrapped lines below `top` and returns the height used. */
+  paragraph(text: string, x: number, top: number, widthMm: number, style: TextStyle): number {
+    const lines = this.wrap(text, widthMm, style)
+    const step = this.lineHeight(style)
+    const anchor = style.align === 'right' ? x + widthMm : style.align === 'centre' ? x + widthMm / 2 : x
+    lines.forEach((line, index) =>
+      this.text(line, anchor, top + this.capHeight(style) + 0.35 + index * step, style),
+    )
+    return lines.length * step
+  }
+
+  line(from: XY, to: XY, style: LineStyle = {}): void {
+    this.polyline([from, to], style)
+  }
+
+  polyline(points: readonly XY[], style: LineStyle = {}): void {
+    this.path(points, false)
+    this.stroke(style)
+  }
+
+  polygon(points: readonly XY[], style: { fill?: string; stroke?: LineStyle }): void {
+    if (style.fill) {
+      this.path(points, true)
+      this.pdf.fill(style.fill)
+    }
+    if (style.stroke) {
+      this.path(points, true)
+      this.stroke(style.stroke)
+    }
+  }
+
+  rect(
+    x: number,
+    y: number,
+    width: number,
+    height: number,
+    style: { fill?: string; stroke?: LineStyle },
+  ): void {
+    this.polygon(
+      [
+        { x, y },
+        { x: x + width, y },
+        { x: x + width, y: y + height },
+        { x, y: y + height },
+      ],
+      style,
+    )
+  }
+
+  circle(centre: XY, radius: number, style: { fill?: string; stroke?: LineStyle }): void {
+    const draw = () => this.pdf.circle(centre.x * PT_PER_MM, centre.y * PT_PER_MM, radius * PT_PER_MM)
+    if (style.fill) draw().fill(style.fill)
+    if (style.stroke) {
+      draw()
+      this.stroke(style.stroke)
+    }
+  }
+
+  /** Thin parallel lines at 45° inside a closed outline. */
+  hatch(
+    outline: readonly XY[],
+    spacingMm: number,
+    direction: 'rising' | 'falling',
+    style: LineStyle = {},
+  ): void {
+    const xs = outline.map((point) => point.x)
+    const ys = outline.map((point) => point.y)
+    const [left, right] = [Math.min(...xs), Math.max(...xs)]
+    const [top, bottom] = [Math.min(...ys), Math.max(...ys)]
+    const height = bottom - top
+    this.pdf.save()
+    this.path(outline, true)
+    this.pdf.clip()
+    const step = spacingMm * Math.SQRT2
+    // Lines start on a grid of the page, not of the part, so that one part in two pieces reads as one.
+    for (let x = Math.floor((left - height) / step) * step; x < right + height; x += step) {
+      const ends = direction === 'rising' ? [bottom, top] : [top, bottom]
+      this.path(
+        [
+          { x, y: ends[0] ?? 0 },
+          { x: x + height, y: ends[1] ?? 0 },
+        ],
+        false,
+      )
+      this.stroke({ widthMm: 0.13, ...style })
+    }
+    this.pdf.restore()
+  }
+
+  /** In points; leaves the font and the size set. */
+  private runWidth(text: string, fontName: string, sizePt: number): number {
+    return this.pdf.font(fontName).fontSize(sizePt).widthOfString(text, digitFeatures(text))
+  }
+
+  private longestPrefix(text: string, widthMm: number, style: TextStyle): number {
+    let low = 1
+    let high = text.length
+    while (low < high) {
+      const middle = Math.ceil((low + high) / 2)
+      if (this.measure(text.slice(0, middle), style) <= widthMm) low = middle
+      else high = middle - 1
+    }
+    return low
+  }
+
+  private path(points: readonly XY[], isClosed: boolean): void {
+    points.forEach((point, index) => {
+      if (index === 0) this.pdf.moveTo(point.x * PT_PER_MM, point.y * PT_PER_MM)
+      else this.pdf.lineTo(point.x * PT_PER_MM, point.y * PT_PER_MM)
+    })
+    if (isClosed) this.pdf.closePath()
+  }
+
+  private stroke(style: LineStyle): void {
+    this.pdf.lineWidth((style.widthMm ?? THIN_MM) * PT_PER_MM).lineJoin('miter')
+    const dash = style.dashMm
+    // The library takes a list of lengths; its types know only one.
+    if (dash) this.pdf.dash(dash.map((length) => length * PT_PER_MM) as unknown as number, {})
+    this.pdf.stroke(style.colour ?? INK)
+    if (dash) this.pdf.undash()
+  }
+
+  /** Draws a sign in points and lays its spelling under it unseen, so that a text search finds it. */
+  private sign(sign: DrawnSign, x: number, baseline: number, size: number, colour: string): void {
+    const { widthEm, spelling } = DRAWN_SIGNS[sign]
+    const pdf = this.pdf
+    pdf.save()
+    pdf
+      .fillOpacity(0)
+      .font('manrope-regular-latin')
+      .fontSize(size * 0.5)
+    pdf.text(spelling, x, baseline, { lineBreak: false, baseline: 'alphabetic' })
+    pdf.restore()
+    pdf.fillOpacity(1)
+    const w = widthEm * size
+    const cap = CAP_HEIGHT * size
+    const middle = baseline - cap / 2
+    pdf.lineWidth(size * 0.075).lineJoin('miter')
+    if (sign === '⌀') {
+      pdf.circle(x + w / 2, middle, cap * 0.42)
+      pdf.moveTo(x + w * 0.18, baseline + size * 0.02).lineTo(x + w * 0.82, baseline - cap - size * 0.02)
+    } else if (sign === '→') {
+      pdf.moveTo(x + w * 0.08, middle).lineTo(x + w * 0.92, middle)
+      pdf.moveTo(x + w * 0.66, middle - size * 0.17).lineTo(x + w * 0.92, middle)
+      pdf.lineTo(x + w * 0.66, middle + size * 0.17)
+    } else if (sign === '□') {
+      pdf.rect(x + w * 0.14, baseline - cap, w * 0.72, cap)
+    } else {
+      const [tip, back] = sign === '≥' ? [0.86, 0.14] : [0.14, 0.86]
+      pdf.moveTo(x + w * back, middle - size * 0.26).lineTo(x + w * tip, middle - size * 0.02)
+      pdf.lineTo(x + w * back, middle + size * 0.2)
+      pdf.moveTo(x + w * 0.14, baseline).lineTo(x + w * 0.86, baseline)
+    }
+    pdf.stroke(colour)
+  }
+}
