@@ -16,7 +16,6 @@ export interface StoredLayout {
   epoch: string
   status: LayoutStatus
   revisionLetter: string
-  isArchived: boolean
 }
 
 export interface EditKey {

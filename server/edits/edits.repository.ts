@@ -2,7 +2,7 @@
 import type { LayoutDocument } from '@shared/layout/layout-document'
 import type { Operation } from '@shared/layout/operations'
 import type { AcceptedEdit, EditNotice, SubmitOutcome } from '@shared/protocol/realtime'
-import { booleanFromColumn, jsonFromColumn, jsonToColumn } from '../database/codecs'
+import { jsonFromColumn, jsonToColumn } from '../database/codecs'
 import type { AppDatabase, Queries, WriteTransaction } from '../database/open-database'
 import type { EditKey, EditReads, EditStorage, EditTransaction, Receipt } from './edit-storage'
 import type { LayoutEditReceiptTable, LayoutEditTable } from './edits.table'
@@ -25,15 +25,7 @@ function reads(queries: Queries): EditReads {
       const row = queries.first(
         queries.kysely
           .selectFrom('layout')
-          .select([
-            'workspace_id',
-            'document',
-            'revision',
-            'epoch',
-            'status',
-            'revision_letter',
-            'is_archived',
-          ])
+          .select(['workspace_id', 'document', 'revision', 'epoch', 'status', 'revision_letter'])
           .where('id', '=', layoutId),
       )
       if (!row) return null
@@ -45,7 +37,6 @@ function reads(queries: Queries): EditReads {
         epoch: row.epoch,
         status: row.status,
         revisionLetter: row.revision_letter,
-        isArchived: booleanFromColumn(row.is_archived),
       }
     },
     readEntries: (layoutId, afterRevision) =>
