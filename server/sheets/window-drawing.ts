@@ -2,7 +2,7 @@
 import {
   type Span,
   windowGeometry,
-  WINDOW_STATE_WORDS,
+  windowStateWords,
   type WindowScale,
   type WindowValues,
 } from '@shared/drawing/interference-window-geometry'
@@ -86,7 +86,7 @@ export function drawWindow(
     NUMBER,
   )
   if (!geometry.bar)
-    writer.text(WINDOW_STATE_WORDS[geometry.state], x + widthMm / 2, top + TRACK_MM / 2 + 0.8, {
+    writer.text(windowStateWords(values), x + widthMm / 2, top + TRACK_MM / 2 + 0.8, {
       ...NUMBER,
       colour: QUIET,
       align: 'centre',

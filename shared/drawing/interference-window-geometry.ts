@@ -73,14 +73,33 @@ export function windowState(values: WindowValues): WindowState {
   return yields ? 'yields' : 'inside'
 }
 
-/** The status chip of a hub. */
-export const WINDOW_STATE_WORDS: Record<WindowState, string> = {
-  inside: 'Inside window',
-  slips: 'Slips',
-  yields: 'Too tight',
-  slipsAndYields: 'Slips and too tight',
-  empty: 'Window is empty',
-  unknown: 'Not computed',
+/** What happens beyond a mark, in a word or two: "slips" below, "yields" or "overheats" above. */
+export function belowWord({ requiredCause }: Pick<WindowValues, 'requiredCause'>): string {
+  return /(slips|comes loose) below/.exec(requiredCause)?.[1] ?? 'loose'
+}
+
+export function aboveWord({ permissibleCause }: Pick<WindowValues, 'permissibleCause'>): string {
+  return /(yields|cracks|overheats|cannot be joined) above/.exec(permissibleCause)?.[1] ?? 'too tight'
+}
+
+const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1)
+
+/** The status of a hub's window in words. */
+export function windowStateWords(values: WindowValues): string {
+  switch (windowState(values)) {
+    case 'inside':
+      return 'Inside window'
+    case 'slips':
+      return capital(belowWord(values))
+    case 'yields':
+      return capital(aboveWord(values))
+    case 'slipsAndYields':
+      return `${capital(belowWord(values))} and ${aboveWord(values)}`
+    case 'empty':
+      return 'Window is empty'
+    case 'unknown':
+      return 'Not computed'
+  }
 }
 
 /** A sign beside the word, so that state is not colour alone and survives black-and-white print. */
@@ -172,12 +191,12 @@ export function windowSentence(values: WindowValues): string {
     minUm === null || maxUm === null
       ? 'The band of the tolerances is not computed.'
       : `Made with ${Math.round(minUm)} to ${um(maxUm)} of interference.`
-  const cause = (text: string) => (text === '' ? '' : ` (${text})`)
+  const cause = (text: string) => (text === '' ? '' : ` – ${text} –`)
   const least = requiredUm === null ? '' : `needs at least ${um(requiredUm)}${cause(requiredCause)}`
-  const most = permissibleUm === null ? '' : `stands at most ${um(permissibleUm)}${cause(permissibleCause)}`
+  const most = permissibleUm === null ? '' : `may have at most ${um(permissibleUm)}${cause(permissibleCause)}`
   const limits = [least, most].filter((text) => text !== '')
   const sentence = limits.length === 0 ? 'Its limits are not computed' : `It ${limits.join(' and ')}`
-  return `${WINDOW_STATE_WORDS[windowState(values)]}. ${band} ${sentence}.`
+  return `${windowStateWords(values)}. ${band} ${sentence}.`
 }
 
 export interface PlacedLabel {

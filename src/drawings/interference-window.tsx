@@ -6,6 +6,8 @@ import { useId } from 'react'
 import { formatNumber, formatResult } from '@/lib/format-quantity'
 import { displayUnit, fromStored, type UnitSystem } from '@/lib/quantity-units'
 import {
+  aboveWord,
+  belowWord,
   placeLabels,
   type Span,
   WINDOW_STATE_SIGNS,
@@ -24,21 +26,13 @@ interface InterferenceWindowProps {
   units: UnitSystem
   /** The common scale of a table; its own when left out. */
   scale?: WindowScale
-  /** What the right mark means: the hub yields, cracks or is overheated beyond it. */
-  aboveWord?: string
 }
 
 /** Drawn in hundredths of the width, so that the strip stretches with its column and patterns do not. */
 const WIDTH = 100
 const percent = (value: number) => `${value.toFixed(3)}%`
 
-export function InterferenceWindow({
-  values,
-  size,
-  units,
-  scale,
-  aboveWord = 'too tight',
-}: InterferenceWindowProps) {
+export function InterferenceWindow({ values, size, units, scale }: InterferenceWindowProps) {
   const usedScale = scale ?? windowScale([values])
   const geometry = windowGeometry(values, usedScale, WIDTH)
   const label = windowSentence(values)
@@ -47,14 +41,7 @@ export function InterferenceWindow({
       <Strip geometry={geometry} y={2} height={12} barHeight={7} />
     </svg>
   ) : (
-    <FullWindow
-      values={values}
-      geometry={geometry}
-      scale={usedScale}
-      label={label}
-      units={units}
-      aboveWord={aboveWord}
-    />
+    <FullWindow values={values} geometry={geometry} scale={usedScale} label={label} units={units} />
   )
 }
 
@@ -64,14 +51,13 @@ interface FullWindowProps {
   scale: WindowScale
   label: string
   units: UnitSystem
-  aboveWord: string
 }
 
 /** Width of a letter at 11 px, in hundredths of an inspector of 300 px: enough to keep labels apart. */
 const LETTER_WIDTH = 1.95
 const ROW_PX = 14
 
-function FullWindow({ values, geometry, scale, label, units, aboveWord }: FullWindowProps) {
+function FullWindow({ values, geometry, scale, label, units }: FullWindowProps) {
   const { minUm, maxUm, requiredUm, permissibleUm } = values
   const number = (um: number) => formatResult(um, 'interference', units).number
   const widthOf = (text: string) => text.length * LETTER_WIDTH + 1
@@ -86,10 +72,10 @@ function FullWindow({ values, geometry, scale, label, units, aboveWord }: FullWi
   const markTexts = [
     requiredUm === null || geometry.requiredMark === null
       ? null
-      : { text: `${number(requiredUm)} slips below`, at: geometry.requiredMark },
+      : { text: `${number(requiredUm)} ${belowWord(values)} below`, at: geometry.requiredMark },
     permissibleUm === null || geometry.permissibleMark === null
       ? null
-      : { text: `${number(permissibleUm)} ${aboveWord} above`, at: geometry.permissibleMark },
+      : { text: `${number(permissibleUm)} ${aboveWord(values)} above`, at: geometry.permissibleMark },
   ]
     .filter((mark) => mark !== null)
     .sort((left, right) => left.at - right.at)

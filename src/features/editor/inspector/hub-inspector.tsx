@@ -6,11 +6,10 @@ import { formatGiven } from '@/lib/format-quantity'
 import type { UnitSystem } from '@/lib/quantity-units'
 import { useResultsStore } from '@/stores/results-store'
 import { shownHubCase } from '@/stores/shown-load-case'
-import { WINDOW_STATE_WORDS, windowState, windowValuesOf } from '@shared/drawing/interference-window-geometry'
+import { windowState, windowStateWords, windowValuesOf } from '@shared/drawing/interference-window-geometry'
 import type { Hub, LayoutDocument } from '@shared/layout/layout-document'
 import { seatUnder } from '@shared/layout/shaft-geometry'
 import type { HubResult } from '@shared/recalculation/layout-results'
-import { aboveWord } from './above-word'
 import { EditingNow } from './editing-now'
 import { FitFields } from './fit-fields'
 import { FrictionFields } from './friction-fields'
@@ -61,7 +60,7 @@ export function HubInspector({ hub, layout, units }: HubInspectorProps) {
       {result === null ? (
         <p className="mt-4 text-sm text-quiet">Calculating…</p>
       ) : (
-        <WindowBlock result={result} layout={layout} units={units} />
+        <WindowBlock result={result} units={units} />
       )}
 
       <div className="mt-3">
@@ -126,54 +125,32 @@ function StateChip({ result }: { result: HubResult }) {
   return (
     <span className="mt-1 shrink-0">
       <Chip tone={tone} icon={tone === 'good' ? 'check' : tone === 'bad' ? 'warning' : 'info'}>
-        {state === 'yields'
-          ? aboveWord(result) === 'yields'
-            ? 'Yields'
-            : 'Too tight'
-          : WINDOW_STATE_WORDS[state]}
+        {windowStateWords(windowValuesOf(result))}
       </Chip>
     </span>
   )
 }
 
 /** The window, large, with what sets its marks and, where it is needed, what would open it. */
-function WindowBlock({
-  result,
-  layout,
-  units,
-}: {
-  result: HubResult
-  layout: LayoutDocument
-  units: UnitSystem
-}) {
+function WindowBlock({ result, units }: { result: HubResult; units: UnitSystem }) {
   const values = windowValuesOf(result)
   const state = windowState(values)
   const { window } = result
-  const inCase = (id: string | null) => {
-    const name = layout.loadCases.find((loadCase) => loadCase.id === id)?.name
-    return name === undefined ? '' : ` in case “${name}”`
-  }
   return (
     <section aria-label="Interference window" className="mt-3">
       <h3 className="text-[13px] text-quiet">Interference window, {units === 'inch' ? 'thou' : 'µm'}</h3>
-      <InterferenceWindow values={values} size="full" units={units} aboveWord={aboveWord(result)} />
+      <InterferenceWindow values={values} size="full" units={units} />
       <dl className="mt-1 grid grid-cols-[auto_1fr] gap-x-2 text-xs leading-5">
         {window.requiredUm !== null && (
           <>
-            <dt className="text-quiet">Least set by</dt>
-            <dd>
-              {window.requiredCause}
-              {inCase(window.requiredLoadCase)}
-            </dd>
+            <dt className="text-quiet">Least</dt>
+            <dd>{window.requiredCause}</dd>
           </>
         )}
         {window.permissibleUm !== null && (
           <>
-            <dt className="text-quiet">Most set by</dt>
-            <dd>
-              {window.permissibleCause}
-              {inCase(window.permissibleLoadCase)}
-            </dd>
+            <dt className="text-quiet">Most</dt>
+            <dd>{window.permissibleCause}</dd>
           </>
         )}
       </dl>
