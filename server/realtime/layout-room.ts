@@ -10,6 +10,7 @@ import type {
   JoinRequest,
   PresenceState,
   PresenceUpdate,
+  RejectReason,
   SubmitOutcome,
 } from '@shared/protocol/realtime'
 import { can } from '../accounts/policy'
@@ -150,7 +151,7 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
     if (!session) return
     const role = roleIn(principal, this.layout.workspaceId)
     if (role === null || !can(principal, 'layout:read', this.layout)) {
-      this.revoke(connectionId)
+      this.revoke(connectionId, 'notFound')
       return
     }
     session.principal = principal
@@ -159,11 +160,11 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
   }
 
   /** The person is out at once, with whatever of theirs still waits in the queue. */
-  revoke(connectionId: string): void {
+  revoke(connectionId: string, reason: RejectReason): void {
     const session = this.#sessions.get(connectionId)
     if (!session) return
     session.principal = { ...session.principal, roles: new Map() }
-    const message = { layoutId: this.layoutId, reason: 'notFound' as const }
+    const message = { layoutId: this.layoutId, reason }
     this.parts.transport().send(connectionId, 'access:revoked', message)
     this.leave(connectionId)
   }

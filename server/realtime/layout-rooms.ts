@@ -16,6 +16,7 @@ import type {
   JoinRequest,
   LogEntryKind,
   PresenceUpdate,
+  RejectReason,
   SubmitOutcome,
 } from '@shared/protocol/realtime'
 import type { Principal } from '../accounts/principal'
@@ -51,7 +52,7 @@ export interface ServerEdit {
 export interface LayoutRooms<Transaction extends EditTransaction = EditTransaction> {
   connect(transport: RoomTransport): void
   join(connectionId: string, principal: Principal, request: JoinRequest): JoinReply
-  leave(connectionId: string, layoutId: string): void
+  leave(connectionId: string): void
   submit(
     connectionId: string,
     layoutId: string,
@@ -61,6 +62,8 @@ export interface LayoutRooms<Transaction extends EditTransaction = EditTransacti
   stall(connectionId: string, layoutId: string, editId: string): void
   updatePresence(connectionId: string, update: PresenceUpdate): void
   changePrincipal(connectionId: string, principal: Principal): void
+  /** Out at once, with a word to the client. */
+  revoke(connectionId: string, reason: RejectReason): void
   changeStatus<Result>(change: StatusChange<Transaction, Result>): Promise<Result>
   submitServerEdit(edit: ServerEdit): Promise<SubmitOutcome>
   announceWorkspace(workspaceId: string, what: MessageOf<'workspace:changed'>['what']): void
@@ -146,9 +149,7 @@ export function createLayoutRooms<Transaction extends EditTransaction>({
       return reply
     },
 
-    leave(connectionId, layoutId) {
-      if (roomJoinedBy(connectionId, layoutId)) leaveRoom(connectionId)
-    },
+    leave: leaveRoom,
 
     submit(connectionId, layoutId, edit, reply) {
       const room = roomJoinedBy(connectionId, layoutId)
@@ -168,6 +169,11 @@ export function createLayoutRooms<Transaction extends EditTransaction>({
       const room = roomOf.get(connectionId)
       room?.changePrincipal(connectionId, principal)
       if (room && !room.has(connectionId)) roomOf.delete(connectionId)
+    },
+
+    revoke(connectionId, reason) {
+      roomOf.get(connectionId)?.revoke(connectionId, reason)
+      roomOf.delete(connectionId)
     },
 
     changeStatus: (change) =>

@@ -38,6 +38,8 @@ export const joinRequestSchema = z.strictObject({
   epoch: z.string().max(64).nullable(),
 })
 
+export const leaveRequestSchema = z.strictObject({ layoutId: id })
+
 export const submitRequestSchema = z.strictObject({
   layoutId: id,
   clientId: clientIdSchema,
