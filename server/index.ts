@@ -24,6 +24,7 @@ import { layoutsRouter } from './layouts/layouts.router'
 import { startMailCatcher } from './mail/mail-catcher'
 import { createMailer } from './mail/mailer'
 import type { ServerParts } from './parts'
+import { attachRealtime } from './realtime/attach-realtime'
 import { createLayoutRooms, type LayoutRooms } from './realtime/layout-rooms'
 import type { SqliteEditTransaction } from './edits/edits.repository'
 import { createEditStorage } from './edits/edits.repository'
@@ -119,6 +120,10 @@ export async function startServer(config: Config, options: StartOptions = {}): P
     const isNewlySeeded = config.seedDemo && !hasUsers(database)
     if (isNewlySeeded) await seedDemo(accounts, layouts)
     httpServer.on('request', app)
+    const realtime = attachRealtime(httpServer, { rooms, accounts, site, logger })
+    release.push(() => {
+      realtime.close()
+    })
 
     return {
       url: site.publicUrl,
