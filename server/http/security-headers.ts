@@ -7,7 +7,10 @@ const YEAR_S = 365 * 24 * 3600
 /** Everything comes from this server; nothing is inline, framed or loaded from elsewhere. */
 export function securityHeaders(site: Site): RequestHandler {
   // 'self' covers wss of the same origin in current browsers; older ones want it spelled out.
-  const sockets = [...site.allowedOrigins].map((origin) => origin.replace(/^http/, 'ws'))
+  // An IPv6 literal is no valid source of a policy.
+  const sockets = [...site.allowedOrigins]
+    .filter((origin) => !origin.includes('['))
+    .map((origin) => origin.replace(/^http/, 'ws'))
   return helmet({
     contentSecurityPolicy: {
       useDefaults: false,
