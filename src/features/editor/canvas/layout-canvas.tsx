@@ -96,14 +96,17 @@ export function LayoutCanvas({ document, driver, onCursor, onContextMenu, childr
   return (
     <div
       ref={wrapper}
-      role="img"
-      aria-label={`Half section of ${document.name}: ${document.hubs.length} hubs, ${document.bearings.length} bearings, ${failing === 0 ? 'nothing fails' : `${failing} failing`}`}
-      aria-describedby={helpId}
       data-testid="layout-canvas"
       className="relative min-h-0 min-w-0 flex-1 touch-none overflow-hidden select-none"
-      style={{ cursor: display.cursor }}
     >
-      <div className="absolute inset-0" {...handlers}>
+      <div
+        role="img"
+        aria-label={`Half section of ${document.name}: ${document.hubs.length} hubs, ${document.bearings.length} bearings, ${failing === 0 ? 'nothing fails' : `${failing} failing`}`}
+        aria-describedby={helpId}
+        className="absolute inset-0"
+        style={{ cursor: display.cursor }}
+        {...handlers}
+      >
         {widthPx > 0 && (
           <Stage ref={stage} width={widthPx} height={heightPx} listening={false}>
             <Layer listening={false}>

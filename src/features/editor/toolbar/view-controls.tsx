@@ -1,0 +1,87 @@
+/** Undo, redo, zoom and help in the corner of the drawing. */
+import { IconButton } from '@/components/icon-button'
+import { useLayoutStore } from '@/stores/layout-store'
+import { chordText } from '../actions/action'
+import { actionById } from '../actions/all-actions'
+import { useBenchActions } from '../bench-actions'
+
+function shortcutOf(id: string): string {
+  const [chord] = actionById(id).chords
+  return chord ? ` (${chordText(chord)})` : ''
+}
+
+export function HistoryControls() {
+  const { run } = useBenchActions()
+  const canEdit = useLayoutStore((state) => state.access?.canEdit ?? false)
+  const canUndo = useLayoutStore((state) => state.canUndo)
+  const canRedo = useLayoutStore((state) => state.canRedo)
+  const undoLabel = useLayoutStore((state) => state.undoLabel)
+  const redoLabel = useLayoutStore((state) => state.redoLabel)
+  if (!canEdit) return null
+  return (
+    <>
+      <IconButton
+        icon="undo"
+        label={`Undo${undoLabel ? `: ${undoLabel}` : ''}${shortcutOf('undo')}`}
+        disabled={!canUndo}
+        onClick={() => run(actionById('undo'))}
+      />
+      <IconButton
+        icon="redo"
+        label={`Redo${redoLabel ? `: ${redoLabel}` : ''}${shortcutOf('redo')}`}
+        disabled={!canRedo}
+        onClick={() => run(actionById('redo'))}
+      />
+    </>
+  )
+}
+
+const TEXT_BUTTON =
+  'flex h-8 min-w-8 items-center justify-center rounded px-2 text-[13px] font-semibold text-ink hover:bg-steel-soft'
+
+export function ViewControls() {
+  const { run } = useBenchActions()
+  return (
+    <div
+      role="group"
+      aria-label="View"
+      className="absolute right-3 bottom-14 z-10 flex items-center rounded-lg border border-hairline bg-card/95"
+    >
+      <button
+        type="button"
+        className={TEXT_BUTTON}
+        aria-label="Zoom out"
+        title={`Zoom out${shortcutOf('zoom-out')}`}
+        onClick={() => run(actionById('zoom-out'))}
+      >
+        −
+      </button>
+      <button
+        type="button"
+        className={TEXT_BUTTON}
+        aria-label="Zoom in"
+        title={`Zoom in${shortcutOf('zoom-in')}`}
+        onClick={() => run(actionById('zoom-in'))}
+      >
+        +
+      </button>
+      <button
+        type="button"
+        className={TEXT_BUTTON}
+        title={`Show the whole shaft${shortcutOf('zoom-to-whole')}`}
+        onClick={() => run(actionById('zoom-to-whole'))}
+      >
+        Whole
+      </button>
+      <button
+        type="button"
+        className={`${TEXT_BUTTON} max-md:hidden`}
+        aria-label="Keyboard shortcuts"
+        title={`Keyboard shortcuts${shortcutOf('help')}`}
+        onClick={() => run(actionById('help'))}
+      >
+        ?
+      </button>
+    </div>
+  )
+}
