@@ -30,6 +30,7 @@ export default function DataRoutes() {
           <Route element={<BareFrame />}>
             <Route path={paths.caughtMail} element={<CaughtMailRoute />} />
             <Route path={paths.invitation()} element={<InvitationRoute />} />
+            <Route path="*" element={<NotFound />} />
           </Route>
           <Route element={<SignedInFrame />}>
             <Route path={paths.home} element={<HomeRoute />} />
@@ -40,14 +41,15 @@ export default function DataRoutes() {
               {/* The bench fills the window and brings its own bar. */}
               <Route path={paths.bench()} element={<BenchRoute />} />
               <Route element={<PageFrame />}>
-                <Route path={paths.layouts()} element={<LayoutsRoute />} />
                 <Route path={paths.people()} element={<PeopleRoute />} />
+              </Route>
+              <Route element={<PageFrame showsResults />}>
+                <Route path={paths.layouts()} element={<LayoutsRoute />} />
                 <Route path={paths.releases()} element={<ReleaseDeskRoute />} />
                 <Route path={paths.release()} element={<ReleaseRoute />} />
               </Route>
             </Route>
           </Route>
-          <Route path="*" element={<NotFound />} />
         </Routes>
       </Suspense>
       <ToastRegion />

@@ -9,10 +9,17 @@ export function rememberWorkspace(workspaceId: string): void {
   }
 }
 
-export function lastWorkspaceId(): string | null {
+function lastWorkspaceId(): string | null {
   try {
     return localStorage.getItem(STORAGE_KEY)
   } catch {
     return null
   }
+}
+
+export function nearestWorkspace<Workspace extends { id: string }>(
+  workspaces: Workspace[],
+): Workspace | null {
+  const lastId = lastWorkspaceId()
+  return workspaces.find((workspace) => workspace.id === lastId) ?? workspaces[0] ?? null
 }

@@ -7,7 +7,7 @@ import { usePageTitle } from './use-page-title'
 export function NoAccess() {
   usePageTitle('No access')
   return (
-    <main className="mx-auto grid max-w-lg gap-4 px-6 py-20">
+    <div className="mx-auto grid max-w-lg gap-4 px-6 py-20">
       <p className="text-sm font-semibold text-quiet">403</p>
       <h1 className="text-2xl font-bold">You have no access to this page</h1>
       <p className="text-quiet">
@@ -17,6 +17,6 @@ export function NoAccess() {
       <Link to={paths.home} className={`${buttonClasses('primary')} w-fit`}>
         Go to your layouts
       </Link>
-    </main>
+    </div>
   )
 }

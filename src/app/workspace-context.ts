@@ -1,5 +1,6 @@
 import { createContext, useContext } from 'react'
 import type { Me } from '@shared/protocol/accounts'
+import { nearestWorkspace } from './last-workspace'
 
 export const MeContext = createContext<Me | null>(null)
 export const WorkspaceContext = createContext<Me['workspaces'][number] | null>(null)
@@ -18,5 +19,9 @@ export function useWorkspace(): Me['workspaces'][number] {
   return workspace
 }
 
-/** Null on pages outside any workspace, such as the account page. */
-export const useWorkspaceIfAny = () => useContext(WorkspaceContext)
+/** On pages outside any workspace, such as the account page, the one opened last; null for a person without any. */
+export function useNearestWorkspace(): Me['workspaces'][number] | null {
+  const current = useContext(WorkspaceContext)
+  const { workspaces } = useSignedIn()
+  return current ?? nearestWorkspace(workspaces)
+}

@@ -15,7 +15,7 @@ export const nextSorting = <Key extends string>(current: Sorting<Key>, key: Key)
 
 export function DataTable({ label, children }: { label: string; children: ReactNode }) {
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label={label}>
+    <div className="relative overflow-x-auto" tabIndex={0} role="region" aria-label={label}>
       <table className="w-full border-collapse text-sm">{children}</table>
     </div>
   )

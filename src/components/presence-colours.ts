@@ -10,5 +10,8 @@ export const PRESENCE_COLOURS = [
   '#86608a',
 ] as const
 
+/** Initials and names on any of them. */
+export const PRESENCE_INK = '#ffffff'
+
 export const presenceColour = (index: number): string =>
   PRESENCE_COLOURS[Math.abs(index) % PRESENCE_COLOURS.length] ?? PRESENCE_COLOURS[0]

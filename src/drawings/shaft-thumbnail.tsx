@@ -3,7 +3,7 @@ import type { Thumbnail } from '@shared/protocol/layouts'
 
 const WIDTH = 400
 const HEIGHT = 190
-const MARGIN_X = 26
+const MARGIN_X = 20
 const MARGIN_Y = 22
 /** A short thick shaft would otherwise fill the picture like a wall. */
 const MAX_PX_PER_MM = 2.2

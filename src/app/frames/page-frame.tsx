@@ -5,8 +5,8 @@ import { ErrorBoundary } from '../error-boundary'
 import { PageLoading } from '../page-loading'
 import { TopBar } from './top-bar'
 
-/** Bar, page, cautions: every signed-in page except the bench. */
-export function PageFrame() {
+/** Bar and page: every signed-in page except the bench. Pages with results carry the cautions. */
+export function PageFrame({ showsResults = false }: { showsResults?: boolean }) {
   const { pathname } = useLocation()
   const main = useRef<HTMLElement>(null)
   const shownPath = useRef(pathname)
@@ -40,9 +40,11 @@ export function PageFrame() {
           </Suspense>
         </ErrorBoundary>
       </main>
-      <footer className="mx-auto w-full max-w-[1400px] px-4 pb-6 sm:px-6">
-        <Cautions />
-      </footer>
+      {showsResults && (
+        <footer className="mx-auto w-full max-w-[1400px] px-4 pb-6 sm:px-6">
+          <Cautions />
+        </footer>
+      )}
     </div>
   )
 }

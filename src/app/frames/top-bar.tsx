@@ -2,7 +2,7 @@ import type { ReactNode } from 'react'
 import { Link, NavLink } from 'react-router'
 import { Mark } from '@/components/mark'
 import { paths } from '@/config/paths'
-import { useWorkspaceIfAny } from '../workspace-context'
+import { useNearestWorkspace } from '../workspace-context'
 import { AccountMenu } from './account-menu'
 import { WorkspaceSwitcher } from './workspace-switcher'
 
@@ -16,7 +16,7 @@ const navClasses = ({ isActive }: { isActive: boolean }) =>
  * `actions`; the mark then leads back to the layouts.
  */
 export function TopBar({ title, actions }: { title?: ReactNode; actions?: ReactNode }) {
-  const workspace = useWorkspaceIfAny()
+  const workspace = useNearestWorkspace()
   return (
     <header className="on-bar bg-bar text-bar-ink">
       <div className="flex h-14 items-center gap-3 px-4 sm:gap-5 sm:px-6">

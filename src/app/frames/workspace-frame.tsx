@@ -3,6 +3,7 @@ import { Outlet, useParams } from 'react-router'
 import { rememberWorkspace } from '../last-workspace'
 import { NoAccess } from '../no-access'
 import { useSignedIn, WorkspaceContext } from '../workspace-context'
+import { TopBar } from './top-bar'
 
 /** Checks that the person belongs to the workspace of the address. The server checks again on every request. */
 export function WorkspaceFrame() {
@@ -13,7 +14,15 @@ export function WorkspaceFrame() {
     if (workspace) rememberWorkspace(workspace.id)
   }, [workspace])
 
-  if (!workspace) return <NoAccess />
+  if (!workspace)
+    return (
+      <>
+        <TopBar />
+        <main id="main">
+          <NoAccess />
+        </main>
+      </>
+    )
   return (
     <WorkspaceContext value={workspace}>
       <Outlet />

@@ -4,11 +4,11 @@ import { Icon } from '@/components/icon'
 import { Menu } from '@/components/menu'
 import { paths } from '@/config/paths'
 import { CreateWorkspaceDialog } from '@/features/accounts/components/create-workspace-dialog'
-import { useSignedIn, useWorkspaceIfAny } from '../workspace-context'
+import { useSignedIn, useNearestWorkspace } from '../workspace-context'
 
 export function WorkspaceSwitcher() {
   const { workspaces } = useSignedIn()
-  const current = useWorkspaceIfAny()
+  const current = useNearestWorkspace()
   const navigate = useNavigate()
   const [isCreating, setIsCreating] = useState(false)
   const open = (workspaceId: string) => void navigate(paths.layouts(workspaceId))

@@ -2,7 +2,7 @@ import { Navigate, useNavigate } from 'react-router'
 import { paths } from '@/config/paths'
 import { CreateWorkspaceForm } from '@/features/accounts/components/create-workspace-form'
 import { TopBar } from '../../frames/top-bar'
-import { lastWorkspaceId } from '../../last-workspace'
+import { nearestWorkspace } from '../../last-workspace'
 import { usePageTitle } from '../../use-page-title'
 import { useSignedIn } from '../../workspace-context'
 
@@ -12,8 +12,7 @@ export default function HomeRoute() {
   const navigate = useNavigate()
   usePageTitle('Start')
 
-  const lastId = lastWorkspaceId()
-  const workspace = workspaces.find((candidate) => candidate.id === lastId) ?? workspaces[0]
+  const workspace = nearestWorkspace(workspaces)
   if (workspace) return <Navigate to={paths.layouts(workspace.id)} replace />
 
   return (

@@ -2,7 +2,6 @@ import { useState } from 'react'
 import { Avatar } from '@/components/avatar'
 import { Button } from '@/components/button'
 import { ConfirmDialog } from '@/components/confirm-dialog'
-import { Cell } from '@/components/data-table'
 import { SelectField } from '@/components/select-field'
 import { showToast } from '@/components/toast-store'
 import { formatDate } from '@/lib/format-time'
@@ -29,19 +28,17 @@ export function MemberRow({ workspaceId, member, isMe, canManage }: MemberRowPro
   const role = changeRole.isPending ? changeRole.variables.role : member.role
 
   return (
-    <tr>
-      <Cell>
-        <div className="flex items-center gap-3">
-          <Avatar name={member.name} />
-          <div className="min-w-0">
-            <p className="font-semibold">
-              {member.name} {isMe && <span className="font-normal text-quiet">(you)</span>}
-            </p>
-            <p className="truncate text-[13px] text-quiet">{member.email}</p>
-          </div>
+    <li className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-4 gap-y-2 border-b border-hairline py-3 sm:grid-cols-[minmax(0,1fr)_11rem_8rem_5rem]">
+      <div className="flex min-w-0 items-center gap-3">
+        <Avatar name={member.name} />
+        <div className="min-w-0">
+          <p className="font-semibold">
+            {member.name} {isMe && <span className="font-normal text-quiet">(you)</span>}
+          </p>
+          <p className="truncate text-[13px] text-quiet">{member.email}</p>
         </div>
-      </Cell>
-      <Cell className="min-w-44">
+      </div>
+      <div className="max-sm:order-last max-sm:col-span-2 max-sm:pl-11">
         {canManage ? (
           <SelectField
             label={`Role of ${member.name}`}
@@ -60,10 +57,10 @@ export function MemberRow({ workspaceId, member, isMe, canManage }: MemberRowPro
         ) : (
           <span title={ROLE_DESCRIPTIONS[member.role]}>{ROLE_NAMES[member.role]}</span>
         )}
-      </Cell>
-      <Cell className="whitespace-nowrap text-quiet max-sm:hidden">{formatDate(member.joinedAt)}</Cell>
+      </div>
+      <p className="text-sm text-quiet max-sm:hidden">since {formatDate(member.joinedAt)}</p>
       {canManage && (
-        <Cell align="right">
+        <div className="text-right">
           <Button
             size="sm"
             variant="quiet"
@@ -95,8 +92,8 @@ export function MemberRow({ workspaceId, member, isMe, canManage }: MemberRowPro
               </p>
             </ConfirmDialog>
           )}
-        </Cell>
+        </div>
       )}
-    </tr>
+    </li>
   )
 }

@@ -1,5 +1,4 @@
 import { useQuery } from '@tanstack/react-query'
-import { ColumnHead, DataTable } from '@/components/data-table'
 import { LoadFailure } from '@/components/load-failure'
 import { Spinner } from '@/components/spinner'
 import { messageOf } from '@/lib/http-client'
@@ -29,31 +28,17 @@ export function PeopleList({ workspaceId, myUserId, canManage }: PeopleListProps
   const pending = people.invitations.filter((invitation) => invitation.status === 'pending')
   return (
     <>
-      <DataTable label="Members">
-        <thead>
-          <tr>
-            <ColumnHead>Person</ColumnHead>
-            <ColumnHead>Role</ColumnHead>
-            <ColumnHead className="max-sm:hidden">Member since</ColumnHead>
-            {canManage && (
-              <ColumnHead>
-                <span className="sr-only">Actions</span>
-              </ColumnHead>
-            )}
-          </tr>
-        </thead>
-        <tbody>
-          {members.map((member) => (
-            <MemberRow
-              key={member.id}
-              workspaceId={workspaceId}
-              member={member}
-              isMe={member.userId === myUserId}
-              canManage={canManage}
-            />
-          ))}
-        </tbody>
-      </DataTable>
+      <ul aria-label="Members" className="border-t border-hairline">
+        {members.map((member) => (
+          <MemberRow
+            key={member.id}
+            workspaceId={workspaceId}
+            member={member}
+            isMe={member.userId === myUserId}
+            canManage={canManage}
+          />
+        ))}
+      </ul>
       {pending.length > 0 && (
         <section className="mt-10">
           <h2 className="mb-2 text-lg font-bold">Open invitations</h2>

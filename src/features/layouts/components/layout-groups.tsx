@@ -9,7 +9,7 @@ export function LayoutGroups({ groups, canEdit }: { groups: ProjectGroup[]; canE
     <div className="grid gap-10">
       {groups.map(({ project, layouts }) => {
         const cards = (
-          <div className="grid grid-cols-[repeat(auto-fill,minmax(min(19rem,100%),1fr))] gap-5">
+          <div className="grid grid-cols-[repeat(auto-fill,minmax(min(23rem,100%),1fr))] gap-5">
             {layouts.map((layout) => (
               <LayoutCard key={layout.id} layout={layout} canEdit={canEdit} />
             ))}
