@@ -13,8 +13,9 @@ interface LayoutTextFieldProps {
   /** An empty text clears the value; otherwise it is refused. */
   isOptional?: boolean
   placeholder?: string
-  /** What is wrong with a text, or null. */
-  check?: (text: string) => string | null
+  /** For values that are not plain text: how they are shown, and read back. */
+  format?: (stored: unknown) => string
+  read?: (text: string) => { ok: true; value: unknown } | { ok: false; message: string }
   className?: string
 }
 
@@ -26,14 +27,15 @@ export function LayoutTextField({
   maxLength = 120,
   isOptional = false,
   placeholder,
-  check,
+  format = (stored) => (typeof stored === 'string' ? stored : ''),
+  read = (text) => ({ ok: true, value: text }),
   className,
 }: LayoutTextFieldProps) {
   const id = useId()
   const field = useLayoutField(address)
   const [draft, setDraft] = useState<string | null>(() => keptDraft(field.draftKey)?.text ?? null)
   const [message, setMessage] = useState<string | null>(() => keptDraft(field.draftKey)?.message ?? null)
-  const values = new Set(shownValues(address).map((value) => (typeof value === 'string' ? value : '')))
+  const values = new Set(shownValues(address).map(format))
   const [only = ''] = values
   const stored = values.size > 1 ? '' : only
 
@@ -42,6 +44,12 @@ export function LayoutTextField({
     setMessage(null)
     keepDraft(field.draftKey, null)
   }
+  const take = (text: string): string | null => {
+    if (text === '') return isOptional ? field.commit(null) : 'Enter something here'
+    if (text.length > maxLength) return `At most ${maxLength} characters`
+    const result = read(text)
+    return result.ok ? field.commit(result.value) : result.message
+  }
   const commit = () => {
     if (draft === null) return
     const text = draft.trim()
@@ -49,12 +57,7 @@ export function LayoutTextField({
       endDraft()
       return
     }
-    const problem =
-      text === '' && !isOptional
-        ? 'Give it a name'
-        : text.length > maxLength
-          ? `At most ${maxLength} characters`
-          : (check?.(text) ?? field.commit(text === '' ? null : text))
+    const problem = take(text)
     if (problem === null) {
       endDraft()
       return

@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react'
+import { JudgedNumber, safetyVerdict } from '@/components/judged-number'
 import { ValueButton } from '@/components/value-button'
 import { formatSafety } from '@/lib/format-quantity'
 import { useDerivationStore } from '@/stores/derivation-store'
@@ -44,7 +45,7 @@ export function ResultRow({ label, name, value, reference, safety }: ResultRowPr
         {value !== '' && <Openable reference={reference} label={`formula of ${spoken}`} text={value} />}
         {safety && (
           <span className={value === '' ? '' : 'ml-2'}>
-            <SafetyValue {...safety} label={spoken} />
+            <Safety {...safety} label={`the safety of ${spoken}`} />
           </span>
         )}
       </span>
@@ -70,29 +71,19 @@ function Openable({
   )
 }
 
-/** A safety with its verdict as sign and colour. */
-export function SafetyValue({
+function Safety({
   value,
   limit,
   reference,
   label,
-}: {
-  value: number | null
-  limit: number | null
-  reference?: QuantityReference
-  label: string
-}) {
-  const isJudged = value !== null && limit !== null
-  const fails = isJudged && value < limit
+}: NonNullable<ResultRowProps['safety']> & { label: string }) {
+  const open = useDerivationStore((state) => state.open)
   return (
-    <span className={!isJudged ? 'text-quiet' : fails ? 'font-bold text-bad' : 'font-bold text-good'}>
-      {fails && <span aria-hidden="true">✕ </span>}
-      {isJudged && <span className="sr-only">{fails ? 'fails, safety ' : 'holds, safety '}</span>}
-      <Openable
-        reference={reference}
-        label={`formula of the safety of ${label}`}
-        text={formatSafety(value, limit)}
-      />
-    </span>
+    <JudgedNumber
+      text={formatSafety(value, limit)}
+      verdict={safetyVerdict(value, limit)}
+      label={label}
+      onOpen={reference === undefined ? undefined : () => open(reference)}
+    />
   )
 }
