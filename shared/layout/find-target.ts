@@ -1,6 +1,6 @@
 /** Finding what an operation points at, and the words for it. */
 import type { LayoutDocument, LoadCase } from './layout-document'
-import type { Target } from './operations'
+import type { ReorderOperation, Target } from './operations'
 
 export type TargetObject = Readonly<Record<string, unknown>>
 
@@ -43,6 +43,12 @@ export function hasPart(document: LayoutDocument, id: string): boolean {
     document.shaft.sections.some((section) => section.id === id) ||
     document.bearings.some((bearing) => bearing.id === id)
   )
+}
+
+/** Where the target stands in its list; -1 when it is not there. */
+export function orderOf(document: LayoutDocument, target: ReorderOperation['target']): number {
+  const lists = { section: document.shaft.sections, hub: document.hubs, loadCase: document.loadCases }
+  return lists[target.kind].findIndex((item) => item.id === target.id)
 }
 
 /** Text that is equal for equal targets. */
