@@ -7,12 +7,14 @@ import { inputHash } from './input-hash'
 import type { Finding, LayoutResults } from './layout-results'
 import { resolveSeat } from './seat'
 import { seatProblemFindings } from './seat-problem-findings'
+import { calculateShaft } from './shaft-results'
 
 export function recalculateLayout(document: LayoutDocument): LayoutResults {
   const resolved = document.hubs.map((hub) => resolveSeat(document, hub))
   const hubs = document.hubs.map((hub, index) =>
     calculateHub(hub.id, hub.joining.side, resolved[index] ?? resolveSeat(document, hub)),
   )
+  const shaft = calculateShaft(document, hubs)
   const findings: Finding[] = document.hubs.flatMap((hub, index) => [
     ...seatProblemFindings(hub, resolved[index]?.problems ?? []),
     ...(hubs[index]?.findings ?? []),
@@ -23,7 +25,7 @@ export function recalculateLayout(document: LayoutDocument): LayoutResults {
     verdict: findings.some((finding) => finding.severity === 'fails') ? 'fails' : 'passes',
     findings,
     hubs: hubs.map((hub) => hub.result),
-    shaft: { loadCases: [], lateralCriticalRpm: [], torsionalHz: [] },
+    shaft: shaft.results,
     assembly: { feasible: true, order: [], blocked: [] },
     cautions: [...CAUTIONS],
   }

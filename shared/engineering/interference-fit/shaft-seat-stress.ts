@@ -19,7 +19,7 @@ export interface ShaftSeatStress {
  * Model: thick ring under outside pressure, plane stress; surface −p(1+Q²)/(1−Q²), bore −2p/(1−Q²); solid −p everywhere.
  * @param pressure [Pa] interface pressure, ≥ 0
  * @param seatDiameter [m] joint diameter, > 0
- * @param shaft [m] bore ≥ 0 and smaller than the seat; material
+ * @param shaft [m] bore ≥ 0 and smaller than the seat
  * @returns [Pa] hoop stresses (negative) and the largest equivalent stress
  * @throws EngineeringInputError `notPositive`, `negative`
  *
@@ -27,7 +27,11 @@ export interface ShaftSeatStress {
  * Source: shigley-9 Eqs. 3-58, 7-44 to 7-47; lame; timoshenko-2
  * Example: timoshenko-2, 4/6 in inner cylinder under 4051 psi: no published figure, −14583 psi at the bore by the formula
  */
-export function shaftSeatStress(pressure: Pressure, seatDiameter: Length, shaft: ShaftRing): ShaftSeatStress {
+export function shaftSeatStress(
+  pressure: Pressure,
+  seatDiameter: Length,
+  shaft: Pick<ShaftRing, 'bore'>,
+): ShaftSeatStress {
   requireNonNegative(pressure, 'pressure')
   requirePositive(seatDiameter, 'seatDiameter')
   const square = (shaft.bore / seatDiameter) ** 2

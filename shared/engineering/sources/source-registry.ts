@@ -215,6 +215,28 @@ export const SOURCE_REGISTRY = [
     clauses: 'unilateral contact as complementarity; Coulomb friction under proportional loading',
     isFromMemory: true,
   },
+  {
+    id: 'belt-friction',
+    citation:
+      'Rope friction (Euler-Eytelwein) and shaft loads of belts and chains, as in any text on machine design',
+    edition: 'common practice',
+    clauses: 'ratio of strand forces; factors of shaft load over effective pull',
+    isFromMemory: true,
+  },
+  {
+    id: 'machine-dynamics',
+    citation: 'Cam followers and unbalance, as in any text on machine dynamics',
+    edition: 'common practice',
+    clauses: 'inertia, spring and energy balance of a cam follower; centrifugal force of an unbalance',
+    isFromMemory: true,
+  },
+  {
+    id: 'iso-80000-3',
+    citation: 'ISO 80000-3, Quantities and units: space and time',
+    edition: '2019',
+    clauses: 'standard acceleration of free fall',
+    isFromMemory: true,
+  },
 ] as const satisfies readonly Source[]
 
 export type SourceId = (typeof SOURCE_REGISTRY)[number]['id']
