@@ -97,6 +97,9 @@ export function LayoutCanvas({ document, driver, onCursor, onContextMenu, childr
     <div
       ref={wrapper}
       data-testid="layout-canvas"
+      data-px-per-mm={view.pxPerMm}
+      data-origin-x-px={view.originXPx}
+      data-origin-y-px={view.originYPx}
       className="relative min-h-0 min-w-0 flex-1 touch-none overflow-hidden select-none"
     >
       <div
