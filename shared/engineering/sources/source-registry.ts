@@ -237,6 +237,42 @@ export const SOURCE_REGISTRY = [
     clauses: 'standard acceleration of free fall',
     isFromMemory: true,
   },
+  {
+    id: 'blackman-vigna',
+    citation: 'D. Blackman, S. Vigna, Scrambled linear pseudorandom number generators',
+    edition: '2021',
+    clauses: 'xoshiro128**',
+    isFromMemory: true,
+  },
+  {
+    id: 'cody-erf',
+    citation: 'W. J. Cody, Rational Chebyshev approximations for the error function, Math. Comp. 23 (1969)',
+    edition: '1969',
+    clauses: 'coefficients of erf and erfc in three ranges',
+    isFromMemory: true,
+  },
+  {
+    id: 'wichura-as241',
+    citation:
+      'M. J. Wichura, Algorithm AS 241: the percentage points of the normal distribution, Appl. Statist. 37 (1988)',
+    edition: '1988',
+    clauses: 'PPND16',
+    isFromMemory: true,
+  },
+  {
+    id: 'abramowitz-stegun',
+    citation: 'M. Abramowitz, I. A. Stegun, Handbook of Mathematical Functions',
+    edition: '1964',
+    clauses: 'Table 26.1: normal probability function',
+    isFromMemory: true,
+  },
+  {
+    id: 'monte-carlo',
+    citation: 'Simulation of tolerance chains, as in any text on statistics',
+    edition: 'common practice',
+    clauses: 'truncated normal sizes after inspection; squared correlation as share of the variance',
+    isFromMemory: true,
+  },
 ] as const satisfies readonly Source[]
 
 export type SourceId = (typeof SOURCE_REGISTRY)[number]['id']
