@@ -5,16 +5,34 @@ import { defineConfig } from 'vite'
 
 const folder = (name: string) => fileURLToPath(new URL(`./${name}`, import.meta.url))
 
-export default defineConfig({
+export default defineConfig(({ command }) => ({
   plugins: [react(), tailwindcss()],
   resolve: {
-    alias: { '@shared': folder('shared'), '@server': folder('server'), '@': folder('src') },
+    alias: {
+      '@shared': folder('shared'),
+      '@server': folder('server'),
+      '@': folder('src'),
+      // The package's exports name its development build only.
+      ...(command === 'build' && {
+        'react-router': folder('node_modules/react-router/dist/production/index.mjs'),
+      }),
+    },
   },
   build: {
     outDir: 'dist/client',
     // The content security policy allows no data: scripts or fonts.
     assetsInlineLimit: 0,
     target: 'es2022',
+    manifest: true,
+    // Every browser that knows es2022 modules preloads them itself.
+    modulePreload: { polyfill: false },
+    rolldownOptions: {
+      output: {
+        codeSplitting: {
+          groups: [{ name: 'zod', test: /node_modules[\\/]zod[\\/]|src[\\/]config[\\/]configure-zod/ }],
+        },
+      },
+    },
   },
   worker: { format: 'es' },
-})
+}))

@@ -1,4 +1,3 @@
-import './config/configure-zod'
 import '@fontsource/manrope/400.css'
 import '@fontsource/manrope/500.css'
 import '@fontsource/manrope/600.css'

@@ -1,4 +1,5 @@
 /** Every page that reads from the server through the query cache. */
+import '@/config/configure-zod'
 import { QueryClientProvider } from '@tanstack/react-query'
 import { lazy, Suspense } from 'react'
 import { Route, Routes } from 'react-router'

@@ -1,9 +1,9 @@
 import type { ReactNode } from 'react'
-import { Icon, type IconName } from './icon'
+import { Sign, type SignName } from './sign'
 
 export type Tone = 'neutral' | 'good' | 'bad' | 'straw' | 'steel'
 
-const TONES: Record<Tone, { classes: string; icon: IconName }> = {
+const TONES: Record<Tone, { classes: string; icon: SignName }> = {
   neutral: { classes: 'border-hairline bg-paper text-ink', icon: 'info' },
   good: { classes: 'border-good/40 bg-good-soft text-ink', icon: 'check' },
   bad: { classes: 'border-bad/40 bg-bad-soft text-ink', icon: 'warning' },
@@ -29,7 +29,7 @@ export function Banner({
       role={tone === 'bad' ? 'alert' : 'status'}
       className={`flex flex-wrap items-start gap-x-3 gap-y-2 rounded-md border px-3.5 py-2.5 text-sm ${classes}`}
     >
-      <Icon
+      <Sign
         name={icon}
         className={`mt-0.5 size-4 ${tone === 'bad' ? 'text-bad' : tone === 'good' ? 'text-good' : ''}`}
       />

@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react'
-import { Icon } from './icon'
+import { Sign } from './sign'
 
 export interface FieldTexts {
   label: string
@@ -38,7 +38,7 @@ export function Field({
       {children}
       {texts.error && (
         <p id={`${id}-error`} className="flex items-start gap-1.5 text-[13px] font-medium text-bad">
-          <Icon name="warning" className="mt-0.5 size-3.5" />
+          <Sign name="warning" className="mt-0.5 size-3.5" />
           <span>{texts.error}</span>
         </p>
       )}

@@ -1,20 +1,20 @@
+import { LineDrawing, SIGN_PATHS } from './sign'
+
 /** Line icons on a 16 px grid, drawn for this product. */
 const PATHS = {
+  ...SIGN_PATHS,
   add: 'M8 3v10M3 8h10',
   archive: 'M2.5 3.5h11v3h-11zM3.5 6.5v6.5h9V6.5M6.5 9h3',
   arrowDown: 'M8 3v10M4 9l4 4 4-4',
   arrowUp: 'M8 13V3M4 7l4-4 4 4',
-  check: 'M3 8.5 6.5 12 13 4.5',
   chevronDown: 'm4 6 4 4 4-4',
   chevronRight: 'm6 4 4 4-4 4',
   close: 'm4 4 8 8M12 4l-8 8',
   copy: 'M5.5 5.5h8v8h-8zM10.5 5.5v-3h-8v8h3',
-  cross: 'm4 4 8 8M12 4l-8 8',
   download: 'M8 2.5v7.5M4.5 7 8 10.5 11.5 7M3 13.5h10',
   edit: 'm3 13 .8-3L11 2.8l2.2 2.2L6 12.2zM9.5 4.3l2.2 2.2',
   eye: 'M1.5 8S4 3.5 8 3.5 14.5 8 14.5 8 12 12.5 8 12.5 1.5 8 1.5 8zM8 9.8a1.8 1.8 0 1 0 0-3.6 1.8 1.8 0 0 0 0 3.6z',
   folder: 'M1.5 4v9h13V5.5h-7L6 4z',
-  info: 'M8 14.5a6.5 6.5 0 1 0 0-13 6.5 6.5 0 0 0 0 13zM8 7.2V11M8 4.8v.4',
   lock: 'M3.5 7.5h9v6h-9zM5.5 7.5V5a2.5 2.5 0 0 1 5 0v2.5',
   mail: 'M1.5 3.5h13v9h-13zM1.5 4.5 8 9l6.5-4.5',
   menu: 'M2.5 4h11M2.5 8h11M2.5 12h11',
@@ -28,22 +28,10 @@ const PATHS = {
   trash: 'M2.5 4.5h11M6 4.5v-2h4v2M4 4.5l.7 9h6.6l.7-9M6.7 7v4M9.3 7v4',
   undo: 'M3 6.5h7a3.5 3.5 0 0 1 0 7H7M6 3 2.5 6.5 6 10',
   upload: 'M8 10.5V3M4.5 6 8 2.5 11.5 6M3 13.5h10',
-  warning: 'M8 2 14.5 13.5h-13zM8 6.5v3.2M8 11.6v.3',
 } as const
 
 export type IconName = keyof typeof PATHS
 
 export function Icon({ name, className = 'size-4' }: { name: IconName; className?: string }) {
-  return (
-    <svg viewBox="0 0 16 16" className={`shrink-0 ${className}`} aria-hidden="true" focusable="false">
-      <path
-        d={PATHS[name]}
-        fill="none"
-        stroke="currentColor"
-        strokeWidth={name === 'more' ? 2.4 : 1.5}
-        strokeLinecap="round"
-        strokeLinejoin="round"
-      />
-    </svg>
-  )
+  return <LineDrawing path={PATHS[name]} className={className} strokeWidth={name === 'more' ? 2.4 : 1.5} />
 }
