@@ -25,6 +25,9 @@ import { startMailCatcher } from './mail/mail-catcher'
 import { createMailer } from './mail/mailer'
 import type { ServerParts } from './parts'
 import { attachRealtime } from './realtime/attach-realtime'
+import { createReleaseMails } from './releases/release-mails'
+import { releasesRouter } from './releases/releases.router'
+import { createReleasesService } from './releases/releases.service'
 import { createLayoutRooms, type LayoutRooms } from './realtime/layout-rooms'
 import type { SqliteEditTransaction } from './edits/edits.repository'
 import { createEditStorage } from './edits/edits.repository'
@@ -110,7 +113,13 @@ export async function startServer(config: Config, options: StartOptions = {}): P
       rooms.close()
     })
     const layouts = createLayoutsService(database, rooms, startingExamples)
-    const routers = [layoutsRouter(layouts), calculationRouter()]
+    const releases = createReleasesService({
+      database,
+      rooms,
+      layouts,
+      mails: createReleaseMails(database, mailer, site),
+    })
+    const routers = [layoutsRouter(layouts), releasesRouter(releases), calculationRouter()]
     const app = createApp(parts, {
       health: healthOf(database, migrations),
       routers,

@@ -2,13 +2,7 @@
  * What stood behind the numbers at freezing, in words for the sheet. Stored with each release, so
  * that a later engine never puts its own method under older numbers.
  */
-import { z } from 'zod'
-
-export const methodNotesSchema = z.strictObject({
-  method: z.array(z.strictObject({ title: z.string(), text: z.string() })),
-  notCovered: z.array(z.string()),
-})
-export type MethodNotes = z.infer<typeof methodNotesSchema>
+import type { MethodNotes } from '@shared/protocol/releases'
 
 export const METHOD_NOTES: MethodNotes = {
   method: [

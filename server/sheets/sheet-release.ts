@@ -1,7 +1,6 @@
 /** What a sheet is drawn from: the stored release and nothing else. */
 import type { LayoutDocument } from '@shared/layout/layout-document'
-import type { Acceptance } from '@shared/protocol/releases'
-import type { MethodNotes } from '../releases/method-notes'
+import type { Acceptance, MethodNotes } from '@shared/protocol/releases'
 import type { LayoutResults } from '@shared/recalculation/layout-results'
 
 export interface SheetRelease {
