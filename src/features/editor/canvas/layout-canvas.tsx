@@ -29,7 +29,8 @@ interface LayoutCanvasProps {
   driver: ToolDriver
   onCursor: (cursor: { xMm: number; yMm: number } | null) => void
   onContextMenu: (place: { xPx: number; yPx: number }) => void
-  /** DOM laid over the drawing: tools, other people's cursors. */
+  letsPageScroll: boolean
+  /** DOM laid over the drawing, such as other people's cursors. */
   children?: ReactNode
 }
 
@@ -57,7 +58,14 @@ function useCanvasSize(
   }, [wrapper, stage])
 }
 
-export function LayoutCanvas({ document, driver, onCursor, onContextMenu, children }: LayoutCanvasProps) {
+export function LayoutCanvas({
+  document,
+  driver,
+  onCursor,
+  onContextMenu,
+  letsPageScroll,
+  children,
+}: LayoutCanvasProps) {
   const wrapper = useRef<HTMLDivElement>(null)
   const stage = useRef<Konva.Stage>(null)
   const helpId = useId()
@@ -100,14 +108,14 @@ export function LayoutCanvas({ document, driver, onCursor, onContextMenu, childr
       data-px-per-mm={view.pxPerMm}
       data-origin-x-px={view.originXPx}
       data-origin-y-px={view.originYPx}
-      className="relative min-h-0 min-w-0 flex-1 touch-none overflow-hidden select-none"
+      className="relative min-h-0 min-w-0 flex-1 overflow-hidden select-none"
     >
       <div
         role="img"
         aria-label={`Half section of ${document.name}: ${document.hubs.length} hubs, ${document.bearings.length} bearings, ${failing === 0 ? 'nothing fails' : `${failing} failing`}`}
         aria-describedby={helpId}
         className="absolute inset-0"
-        style={{ cursor: display.cursor }}
+        style={{ cursor: display.cursor, touchAction: letsPageScroll ? 'pan-y' : 'none' }}
         {...handlers}
       >
         {widthPx > 0 && (

@@ -1,4 +1,5 @@
 /** Undo, redo, zoom and help in the corner of the drawing. */
+import type { ReactNode } from 'react'
 import { IconButton } from '@/components/icon-button'
 import { useLayoutStore } from '@/stores/layout-store'
 import { chordText } from '../actions/action'
@@ -10,7 +11,7 @@ function shortcutOf(id: string): string {
   return chord ? ` (${chordText(chord)})` : ''
 }
 
-export function HistoryControls() {
+function HistoryControls() {
   const { run } = useBenchActions()
   const canEdit = useLayoutStore((state) => state.access?.canEdit ?? false)
   const canUndo = useLayoutStore((state) => state.canUndo)
@@ -39,7 +40,7 @@ export function HistoryControls() {
 const TEXT_BUTTON =
   'flex h-8 min-w-8 items-center justify-center rounded px-2 text-[13px] font-semibold text-ink hover:bg-steel-soft'
 
-export function ViewControls() {
+export function ViewControls({ children }: { children?: ReactNode }) {
   const { run } = useBenchActions()
   return (
     <div
@@ -47,6 +48,7 @@ export function ViewControls() {
       aria-label="View"
       className="absolute right-3 bottom-14 z-10 flex items-center rounded-lg border border-hairline bg-card/95"
     >
+      <HistoryControls />
       <button
         type="button"
         className={TEXT_BUTTON}
@@ -82,6 +84,7 @@ export function ViewControls() {
       >
         ?
       </button>
+      {children}
     </div>
   )
 }

@@ -1,0 +1,59 @@
+/** The drawing with what floats over it: tools, view, the menu of a part, the hint of the tool in hand. */
+import { type ReactNode, useCallback, useState } from 'react'
+import type { LayoutDocument } from '@shared/layout/layout-document'
+import { useLayoutSession } from '@/lib/layout-session-context'
+import type { ViewTransform } from '@/lib/view-transform'
+import { useBenchActions } from './bench-actions'
+import { LayoutCanvas } from './canvas/layout-canvas'
+import { PartMenu } from './toolbar/part-menu'
+import { StatusLine } from './toolbar/status-line'
+import { ToolList } from './toolbar/tool-list'
+import { ViewControls } from './toolbar/view-controls'
+import { partExtent, type PartExtent } from './tools/part'
+import { useViewStore } from './view-store'
+
+/** What another feature needs to lay its own marks over the drawing. */
+export interface DrawingPlace {
+  view: ViewTransform
+  extentOf: (partId: string) => PartExtent | null
+}
+
+interface DrawingProps {
+  document: LayoutDocument
+  /** Buttons beside zoom, such as the choice of regions. */
+  viewExtras?: ReactNode
+  /** A page that scrolls under a finger keeps vertical swipes for itself. */
+  letsPageScroll?: boolean
+  overlay?: (place: DrawingPlace) => ReactNode
+}
+
+export function Drawing({ document, viewExtras, letsPageScroll = false, overlay }: DrawingProps) {
+  const session = useLayoutSession()
+  const { driver } = useBenchActions()
+  const view = useViewStore((state) => state.view)
+  const [menuPlace, setMenuPlace] = useState<{ xPx: number; yPx: number } | null>(null)
+  const shareCursor = useCallback(
+    (cursor: { xMm: number; yMm: number } | null) => session.updatePresence({ cursor }),
+    [session],
+  )
+  const closeMenu = useCallback(() => setMenuPlace(null), [])
+  const extentOf = useCallback((partId: string) => partExtent(document, partId), [document])
+
+  return (
+    <div className="relative flex min-h-0 min-w-0 flex-1">
+      <LayoutCanvas
+        document={document}
+        driver={driver}
+        onCursor={shareCursor}
+        onContextMenu={setMenuPlace}
+        letsPageScroll={letsPageScroll}
+      >
+        {overlay?.({ view, extentOf })}
+      </LayoutCanvas>
+      <ToolList />
+      <StatusLine />
+      <ViewControls>{viewExtras}</ViewControls>
+      {menuPlace && <PartMenu place={menuPlace} onClose={closeMenu} />}
+    </div>
+  )
+}

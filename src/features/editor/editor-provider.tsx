@@ -1,0 +1,68 @@
+/** What drawing, outline and toolbar have in common: the tool driver, the actions, the keyboard, the help. */
+import { type ReactNode, useEffect, useMemo, useState } from 'react'
+import { useLayoutSession } from '@/lib/layout-session-context'
+import { useLayoutStore } from '@/stores/layout-store'
+import { useSelectionStore } from '@/stores/selection-store'
+import { createNudger } from './actions/nudge'
+import { useShortcuts } from './actions/use-shortcuts'
+import { BenchActionsContext, createBenchActions } from './bench-actions'
+import { createToolDriver } from './tool-driver'
+import { ShortcutsDialog } from './toolbar/shortcuts-dialog'
+import { partKind } from './tools/part'
+import { useViewStore } from './view-store'
+
+const MOST_SHARED_SELECTION = 50
+
+export function EditorProvider({ children }: { children: ReactNode }) {
+  const session = useLayoutSession()
+  const [isHelpOpen, setIsHelpOpen] = useState(false)
+  const actions = useMemo(
+    () =>
+      createBenchActions(session, createToolDriver(session), createNudger(session), () =>
+        setIsHelpOpen(true),
+      ),
+    [session],
+  )
+  useShortcuts(actions.context, actions.nudger)
+  useSelectionUpkeep()
+
+  useEffect(() => {
+    useViewStore.setState({ isWhole: true, bounds: null, hoverStationMm: null })
+    return () => {
+      actions.driver.dispose()
+      useSelectionStore.getState().clear()
+    }
+  }, [actions])
+
+  // What this person has selected is drawn in the other windows.
+  useEffect(
+    () =>
+      useSelectionStore.subscribe((state, previous) => {
+        if (state.selectedIds === previous.selectedIds) return
+        session.updatePresence({ selection: state.selectedIds.slice(0, MOST_SHARED_SELECTION) })
+      }),
+    [session],
+  )
+
+  return (
+    <BenchActionsContext value={actions}>
+      {children}
+      {isHelpOpen && <ShortcutsDialog onClose={() => setIsHelpOpen(false)} />}
+    </BenchActionsContext>
+  )
+}
+
+/** A part that somebody else removed is not selected any more; losing the right to edit puts a drag back. */
+function useSelectionUpkeep(): void {
+  useEffect(
+    () =>
+      useLayoutStore.subscribe((state, previous) => {
+        const document = state.visible
+        if (!document || document === previous.visible) return
+        const { selectedIds, select } = useSelectionStore.getState()
+        const still = selectedIds.filter((id) => partKind(document, id) !== null)
+        if (still.length < selectedIds.length) select(still)
+      }),
+    [],
+  )
+}
