@@ -150,8 +150,24 @@ export function formatSafety(value: number | null, limit?: number | null): strin
   return `< ${formatNumber(limit ?? value, 2)}`
 }
 
-/** A number of a finding or a derivation whose unit is only known as text. */
-export function formatWithUnit(value: number | null, unit: string): string {
+const KIND_OF_UNIT: Record<string, QuantityKind> = {
+  mm: 'length',
+  µm: 'interference',
+  MPa: 'stress',
+  'N·m': 'torque',
+  N: 'force',
+  '°C': 'temperature',
+  K: 'temperatureDifference',
+  rpm: 'speed',
+  mrad: 'slope',
+  kg: 'mass',
+  '°': 'angle',
+}
+
+/** A number of a finding or a derivation, whose unit comes as text. */
+export function formatWithUnit(value: number | null, unit: string, system: UnitSystem = 'metric'): string {
   if (value === null || !Number.isFinite(value)) return NOT_COMPUTED
+  const kind = KIND_OF_UNIT[unit]
+  if (kind !== undefined) return formatResult(value, kind, system).text
   return assemble(unit === '' ? formatSafety(value) : formatNumber(value), unit).text
 }
