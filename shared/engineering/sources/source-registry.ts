@@ -273,6 +273,20 @@ export const SOURCE_REGISTRY = [
     clauses: 'truncated normal sizes after inspection; squared correlation as share of the variance',
     isFromMemory: true,
   },
+  {
+    id: 'seat-equilibrium',
+    citation: 'Equilibrium of a rigid hub on its seat with a cosine pressure round the circumference',
+    edition: 'derived here',
+    clauses: 'F_r = ∫ p₀ cos²t (D/2) L dt and the moment of a pressure linear along the seat',
+    isFromMemory: false,
+  },
+  {
+    id: 'heat-transfer',
+    citation: 'Lumped-capacity cooling by convection, radiation and contact, as in any text on heat transfer',
+    edition: 'common practice',
+    clauses: 'Newton cooling, Stefan-Boltzmann law, thermal contact conductance',
+    isFromMemory: true,
+  },
 ] as const satisfies readonly Source[]
 
 export type SourceId = (typeof SOURCE_REGISTRY)[number]['id']
