@@ -87,6 +87,10 @@ export async function up(db: Kysely<unknown>): Promise<void> {
     WHEN EXISTS (SELECT 1 FROM layout_release WHERE layout_id = OLD.id)
     BEGIN SELECT RAISE(ABORT, 'a layout with releases is never deleted'); END`.execute(db)
   await sql`
+    CREATE TRIGGER layout_with_release_refuses_replace BEFORE INSERT ON layout
+    WHEN EXISTS (SELECT 1 FROM layout_release WHERE layout_id = NEW.id)
+    BEGIN SELECT RAISE(ABORT, 'a layout with releases is never replaced'); END`.execute(db)
+  await sql`
     CREATE TRIGGER layout_with_release_refuses_move BEFORE UPDATE OF id, workspace_id ON layout
     WHEN EXISTS (SELECT 1 FROM layout_release WHERE layout_id = OLD.id)
       AND (NEW.id IS NOT OLD.id OR NEW.workspace_id IS NOT OLD.workspace_id)
