@@ -1,42 +1,15 @@
+import { CRITERIA_FIELDS } from '@/fields/criteria-fields'
 import { LayoutQuantityField } from '@/fields/layout-quantity-field'
 import { LayoutTextField } from '@/fields/layout-text-field'
 import { criteriaAddress } from '@/fields/part-address'
 import { formatGiven } from '@/lib/format-quantity'
-import type { QuantityKind, UnitSystem } from '@/lib/quantity-units'
+import type { UnitSystem } from '@/lib/quantity-units'
 import { useResultsStore } from '@/stores/results-store'
-import type { Criteria, LayoutDocument } from '@shared/layout/layout-document'
+import type { LayoutDocument } from '@shared/layout/layout-document'
 import { totalLengthMm } from '@shared/layout/shaft-geometry'
 import { EditingNow } from './editing-now'
 import { FieldGrid, Group } from './inspector-parts'
 import { MaterialFields } from './material-fields'
-
-interface CriterionField {
-  field: keyof Criteria
-  label: string
-  kind: QuantityKind
-  isOptional?: boolean
-  minIsZero?: boolean
-  max: number
-}
-
-export const CRITERIA_FIELDS: readonly CriterionField[] = [
-  { field: 'slipSafety', label: 'Slip safety', kind: 'ratio', max: 100 },
-  { field: 'hubYieldSafety', label: 'Hub yield safety', kind: 'ratio', max: 100 },
-  { field: 'brittleSafety', label: 'Brittle hub safety', kind: 'ratio', max: 100 },
-  { field: 'shaftYieldSafety', label: 'Shaft yield safety', kind: 'ratio', max: 100 },
-  { field: 'fatigueSafety', label: 'Fatigue safety', kind: 'ratio', max: 100 },
-  { field: 'meshSlopeMrad', label: 'Slope at gears', kind: 'slope', max: 1_000 },
-  { field: 'bearingSlopeMrad', label: 'Slope at bearings', kind: 'slope', max: 1_000 },
-  {
-    field: 'meshDeflectionUm',
-    label: 'Deflection at gears',
-    kind: 'interference',
-    isOptional: true,
-    max: 1e6,
-  },
-  { field: 'minGapMm', label: 'Gap between parts', kind: 'length', minIsZero: true, max: 10_000 },
-  { field: 'minLengthToDiameter', label: 'Length to diameter', kind: 'ratio', minIsZero: true, max: 100 },
-]
 
 /** Nothing selected: the layout itself. */
 export function LayoutInspector({ layout, units }: { layout: LayoutDocument; units: UnitSystem }) {
@@ -87,7 +60,7 @@ export function LayoutInspector({ layout, units }: { layout: LayoutDocument; uni
       </Group>
       <Group title="Acceptance criteria" note="least or most allowed">
         <FieldGrid>
-          {CRITERIA_FIELDS.map(({ field, label, kind, isOptional, minIsZero, max }) => (
+          {CRITERIA_FIELDS.map(({ field, label, kind, isOptional, isZeroAllowed, max }) => (
             <LayoutQuantityField
               key={field}
               label={label}
@@ -96,7 +69,7 @@ export function LayoutInspector({ layout, units }: { layout: LayoutDocument; uni
               isOptional={isOptional}
               placeholder={isOptional ? 'not judged' : undefined}
               min={0}
-              isMinExclusive={minIsZero !== true}
+              isMinExclusive={isZeroAllowed !== true}
               max={max}
             />
           ))}
