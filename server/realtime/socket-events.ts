@@ -78,7 +78,7 @@ export function handleEvents(socket: RealtimeSocket, { rooms, limits, logger }: 
         logger.error({ err: error, event, userId: principal().userId }, 'A socket event failed')
       })
     }
-    socket.on(event, listener as never)
+    socket.on(event, listener)
   }
 }
 

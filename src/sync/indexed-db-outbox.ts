@@ -32,10 +32,12 @@ export function createIndexedDbOutbox(factory: IDBFactory = indexedDB): Outbox {
 
   return {
     async load(layoutId) {
-      const records = await inTransaction<OutboxRecord[]>('readonly', (edits) =>
-        edits.index(BY_LAYOUT).getAll(layoutId),
+      const records: unknown = await inTransaction(
+        'readonly',
+        (edits) => edits.index(BY_LAYOUT).getAll(layoutId) as IDBRequest<unknown>,
       )
-      return inOrder(records)
+      // Only `put` below writes this store.
+      return inOrder(records as OutboxRecord[])
     },
     async put(record) {
       await inTransaction('readwrite', (edits) => edits.put(record))
