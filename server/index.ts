@@ -1,6 +1,6 @@
 /** Starts the whole server on one port: migrations, mail, accounts, HTTP, sockets, demo data. */
 import { chmodSync, readFileSync } from 'node:fs'
-import { createServer, type Server } from 'node:http'
+import { createServer, type RequestListener, type Server } from 'node:http'
 import type { AddressInfo } from 'node:net'
 import path from 'node:path'
 import type { RequestHandler } from 'express'
@@ -45,8 +45,8 @@ export interface RunningServer {
 }
 
 export interface StartOptions {
-  /** Serves the pages; by default the built client. */
-  client?: RequestHandler
+  /** Makes what serves the pages; by default the built client. Called before the first request is answered. */
+  client?: (httpServer: Server) => Promise<RequestHandler>
   logger?: Logger
 }
 
@@ -78,7 +78,10 @@ export async function startServer(config: Config, options: StartOptions = {}): P
       database.close()
     })
 
-    const httpServer = createServer()
+    let handle: RequestListener = stillStarting
+    const httpServer = createServer((request, response) => {
+      handle(request, response)
+    })
     httpServer.headersTimeout = HEADERS_TIMEOUT_MS
     httpServer.requestTimeout = REQUEST_TIMEOUT_MS
     const port = await listen(httpServer, config)
@@ -123,12 +126,12 @@ export async function startServer(config: Config, options: StartOptions = {}): P
     const app = createApp(parts, {
       health: healthOf(database, migrations),
       routers,
-      client: options.client ?? staticClient(config.clientDir),
+      client: options.client ? await options.client(httpServer) : staticClient(config.clientDir),
     })
 
     const isNewlySeeded = config.seedDemo && !hasUsers(database)
     if (isNewlySeeded) await seedDemo(accounts, layouts)
-    httpServer.on('request', app)
+    handle = app
     const realtime = attachRealtime(httpServer, { rooms, accounts, site, logger })
     release.push(() => {
       realtime.close()
@@ -148,6 +151,11 @@ export async function startServer(config: Config, options: StartOptions = {}): P
     await releaseAll()
     throw error
   }
+}
+
+/** The port is ours, the demo data is not there yet. */
+const stillStarting: RequestListener = (_request, response) => {
+  response.writeHead(503, { 'Retry-After': '1', 'Content-Type': 'text/plain' }).end('Starting')
 }
 
 function listen(server: Server, { port, host }: Config): Promise<number> {
