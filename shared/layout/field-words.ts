@@ -1,4 +1,4 @@
-/** Words for targets and fields, for notices such as "Pinion, length". */
+/** Words for targets and fields, for notices such as "length of Pinion". */
 import { findTarget } from './find-target'
 import type { LayoutDocument } from './layout-document'
 import type { Operation, Target } from './operations'
@@ -35,12 +35,11 @@ export function targetWords(document: LayoutDocument, target: Target): string {
 
 const MISSING_WORDS = { hub: 'a hub', bearing: 'a bearing', loadCase: 'a load case' } as const
 
-/** "Pinion, length": the target and the field, where there is one. */
+/** "length of Pinion": the target and the field, where there is one. */
 export function operationWords(document: LayoutDocument, operation: Operation): string {
   switch (operation.type) {
     case 'set': {
-      const words = targetWords(document, operation.target)
-      return operation.field === 'name' ? `name of ${words}` : `${words}, ${fieldWords(operation.field)}`
+      return `${fieldWords(operation.field)} of ${targetWords(document, operation.target)}`
     }
     case 'add': {
       if ('name' in operation.item) return operation.item.name
@@ -49,7 +48,7 @@ export function operationWords(document: LayoutDocument, operation: Operation): 
     case 'remove':
       return operation.name ?? targetWords(document, operation.target)
     case 'reorder':
-      return `${targetWords(document, operation.target)}, order`
+      return `order of ${targetWords(document, operation.target)}`
   }
 }
 

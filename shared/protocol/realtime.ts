@@ -85,7 +85,7 @@ export type RejectReason = (typeof REJECT_REASONS)[number]
 /** Something both people should know about an accepted edit. */
 export interface EditNotice {
   kind: 'overwrote' | 'dropped'
-  /** Words for the target: "Pinion, length". */
+  /** Words for the target: "length of Pinion". */
   what: string
   /** Whose value was overwritten, or who removed the part. */
   byName: string | null
