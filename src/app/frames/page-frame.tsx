@@ -1,8 +1,10 @@
-import { Suspense, useEffect, useRef } from 'react'
+import { Suspense, useContext, useEffect, useRef } from 'react'
 import { Outlet, useLocation } from 'react-router'
 import { Cautions } from '@/drawings/cautions'
 import { ErrorBoundary } from '../error-boundary'
 import { PageLoading } from '../page-loading'
+import { useWorkspaceNews } from '../use-workspace-news'
+import { WorkspaceContext } from '../workspace-context'
 import { TopBar } from './top-bar'
 
 /** Bar and page: every signed-in page except the bench. Pages with results carry the cautions. */
@@ -10,6 +12,7 @@ export function PageFrame({ showsResults = false }: { showsResults?: boolean }) 
   const { pathname } = useLocation()
   const main = useRef<HTMLElement>(null)
   const shownPath = useRef(pathname)
+  useWorkspaceNews(useContext(WorkspaceContext)?.id ?? null)
 
   useEffect(() => {
     if (shownPath.current === pathname) return
