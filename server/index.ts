@@ -3,7 +3,7 @@ import { chmodSync, readFileSync } from 'node:fs'
 import { createServer, type RequestListener, type Server } from 'node:http'
 import type { AddressInfo } from 'node:net'
 import path from 'node:path'
-import type { RequestHandler } from 'express'
+import type { Express, RequestHandler } from 'express'
 import type { Logger } from 'pino'
 import { createAccounts } from './accounts/accounts'
 import { hasUsers } from './accounts/accounts.repository'
@@ -39,6 +39,7 @@ export interface RunningServer {
   layouts: LayoutsService
   rooms: LayoutRooms<SqliteEditTransaction>
   httpServer: Server
+  app: Express
   /** True when this start filled a new database with the demo data. */
   isNewlySeeded: boolean
   close(): Promise<void>
@@ -144,6 +145,7 @@ export async function startServer(config: Config, options: StartOptions = {}): P
       layouts,
       rooms,
       httpServer,
+      app,
       isNewlySeeded,
       close: releaseAll,
     }

@@ -1,3 +1,4 @@
+import { createHash } from 'node:crypto'
 import type { Role } from '@shared/protocol/roles'
 import { dateToColumn } from '../database/codecs'
 import type { Queries } from '../database/open-database'
@@ -170,6 +171,18 @@ export function userNames(queries: Queries, userIds: readonly string[]): Map<str
 
 export function findUser(queries: Queries, userId: string) {
   return queries.first(queries.kysely.selectFrom('user').where('id', '=', userId).select(['name', 'email']))
+}
+
+/** Whom a link for a new password was sent to, while it is good. */
+export function findPersonOfResetToken(queries: Queries, token: string) {
+  const identifier = createHash('sha256').update(`reset-password:${token}`).digest('base64url')
+  return queries.first(
+    queries.kysely
+      .selectFrom('verification')
+      .innerJoin('user', 'user.id', 'verification.value')
+      .where('verification.identifier', '=', identifier)
+      .select(['user.name', 'user.email']),
+  )
 }
 
 export function hasUsers(queries: Queries): boolean {

@@ -35,7 +35,7 @@ export function createAccounts(parts: AccountsParts): Accounts {
     ...createPrincipalResolver(auth, database),
     onRevoked: (listener) => revocations.onRevoked(listener),
     service: createAccountsService(auth, database, revocations, logger),
-    signIn: createSignInService(auth, logger),
+    signIn: createSignInService(auth, database, logger),
     async createConfirmedPerson({ name, email, password }) {
       const context = await auth.$context
       const user = await context.internalAdapter.createUser(

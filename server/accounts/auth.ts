@@ -125,7 +125,8 @@ export function createAuth(parts: AuthParts) {
     },
     user: { fields: { emailVerified: 'email_verified', ...timestamps } },
     account: { fields: accountColumns },
-    verification: { fields: { expiresAt: 'expires_at', ...timestamps } },
+    // Whoever reads the database must not be able to set a password with what stands there.
+    verification: { fields: { expiresAt: 'expires_at', ...timestamps }, storeIdentifier: 'hashed' },
     session: {
       fields: sessionColumns,
       expiresIn: IDLE_LIFETIME_S,

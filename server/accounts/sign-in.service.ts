@@ -1,6 +1,8 @@
 /** Opening, confirming and using an account. Answers carry cookies, never tokens. */
 import type { Logger } from 'pino'
+import type { Queries } from '../database/open-database'
 import { HttpError } from '../http/http-error'
+import { findPersonOfResetToken } from './accounts.repository'
 import type { Auth } from './auth'
 import { translateRefusals } from './auth-errors'
 import type { Caller } from './caller'
@@ -22,7 +24,7 @@ export interface SignInService {
   changeName(caller: Caller, name: string): Promise<void>
 }
 
-export function createSignInService(auth: Auth, logger: Logger): SignInService {
+export function createSignInService(auth: Auth, queries: Queries, logger: Logger): SignInService {
   async function refuseWeak(password: string, field: string, person: { name: string; email: string }) {
     const problem = await passwordProblem(password, person)
     if (problem) throw new HttpError('bad-request', 'Some of this is not usable.', { [field]: problem })
@@ -61,7 +63,9 @@ export function createSignInService(auth: Auth, logger: Logger): SignInService {
     },
 
     async resetPassword(token, newPassword) {
-      await refuseWeak(newPassword, 'newPassword', { name: '', email: '' })
+      const person = findPersonOfResetToken(queries, token)
+      // An unknown token is refused below; the rules need somebody whose name must not be in it.
+      if (person) await refuseWeak(newPassword, 'newPassword', person)
       await translateRefusals(auth.api.resetPassword({ body: { token, newPassword } }))
     },
 

@@ -2,25 +2,21 @@
 import { existsSync } from 'node:fs'
 import path from 'node:path'
 import express, { type RequestHandler, Router } from 'express'
-import { notFound } from './http-error'
+import { HttpError } from './http-error'
 
 const YEAR_MS = 365 * 24 * 3600 * 1000
 
 export function staticClient(clientDir: string): Router {
   const router = Router()
-  const page = path.join(clientDir, 'index.html')
   // Vite puts a hash of the content into these names.
-  router.use(
-    '/assets',
-    express.static(path.join(clientDir, 'assets'), {
-      immutable: true,
-      maxAge: YEAR_MS,
-      index: false,
-      fallthrough: false,
-    }),
-  )
+  const assets = express.static(path.join(clientDir, 'assets'), {
+    immutable: true,
+    maxAge: YEAR_MS,
+    index: false,
+  })
+  router.use('/assets', assets)
   router.use(express.static(clientDir, { index: false, maxAge: 0 }))
-  router.get('/{*path}', sendPage(page))
+  router.get('/{*path}', sendPage(path.join(clientDir, 'index.html')))
   return router
 }
 
@@ -31,7 +27,7 @@ function sendPage(page: string): RequestHandler {
       next()
       return
     }
-    if (!existsSync(page)) throw notFound('The client is not built yet. Run: npm run build')
+    if (!existsSync(page)) throw new HttpError('unavailable', 'The client is not built. Run: npm run build')
     response.set('Cache-Control', 'no-cache').sendFile(page)
   }
 }

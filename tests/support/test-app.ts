@@ -63,13 +63,17 @@ export interface TestApp {
 export const NEW_PERSON_PASSWORD = 'quiet lathe, loud press'
 
 export interface TestAppOptions {
+  /** Serves these pages instead of the built client. */
+  clientDir?: string
   environment?: Record<string, string>
 }
 
-export async function startTestApp({ environment = {} }: TestAppOptions = {}): Promise<TestApp> {
+export async function startTestApp({ environment = {}, clientDir }: TestAppOptions = {}): Promise<TestApp> {
   const dataDir = mkdtempSync(path.join(tmpdir(), 'hubstead-test-'))
-  const config = (): Config =>
-    readConfig({ NODE_ENV: 'test', PORT: '0', DATA_DIR: dataDir, LOG_LEVEL: 'silent', ...environment })
+  const config = (): Config => ({
+    ...readConfig({ NODE_ENV: 'test', PORT: '0', DATA_DIR: dataDir, LOG_LEVEL: 'silent', ...environment }),
+    ...(clientDir ? { clientDir } : {}),
+  })
   let server = await startServer(config())
 
   const origin = () => server.url
