@@ -85,7 +85,7 @@ export function sectionForces(
   const moveTo = (station: number) => {
     sum.momentZ += sum.y * (station - place)
     sum.momentY -= sum.z * (station - place)
-    place = station as Length
+    place = station
   }
   stations.forEach(({ station, side }, index) => {
     for (let load = ordered[next]; load && isLeftOf(load.station, station, side); load = ordered[next]) {
