@@ -37,7 +37,7 @@ export function Dialog({ title, description, onClose, children, footer, size = '
     <dialog
       ref={dialog}
       aria-labelledby={titleId}
-      className={`m-auto max-h-[calc(100dvh-2rem)] w-[calc(100%-2rem)] overflow-auto rounded-lg border border-hairline bg-card p-0 text-ink shadow-xl ${WIDTHS[size]}`}
+      className={`m-auto max-h-[calc(100dvh-2rem)] w-[calc(100%-2rem)] overflow-auto rounded-lg border border-hairline bg-card p-0 text-left font-normal whitespace-normal text-ink shadow-xl ${WIDTHS[size]}`}
       onCancel={(event) => {
         event.preventDefault()
         onClose()

@@ -9,6 +9,7 @@ import { CaughtMailHint } from '@/features/accounts/components/caught-mail-hint'
 import { emailProblem } from '@/features/accounts/field-rules'
 import { formErrors } from '@/lib/form-errors'
 import { useSubmission } from '@/features/accounts/hooks/use-submission'
+import { focusFirstInvalid } from '@/lib/focus-first-invalid'
 import { usePageTitle } from '../../use-page-title'
 
 export default function ForgottenPasswordRoute() {
@@ -19,11 +20,12 @@ export default function ForgottenPasswordRoute() {
   const { isBusy, error, submit } = useSubmission()
   const { fields, form } = formErrors(error, ['email'])
 
-  const onSubmit = async (event: FormEvent) => {
+  const onSubmit = async (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     const found = emailProblem(email)
     setProblem(found)
-    if (!found && (await submit(() => requestPasswordReset(email.trim())))) setSentTo(email.trim())
+    if (found) return focusFirstInvalid(event.currentTarget)
+    if (await submit(() => requestPasswordReset(email.trim()))) setSentTo(email.trim())
   }
 
   return (

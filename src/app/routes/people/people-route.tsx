@@ -12,7 +12,7 @@ export default function PeopleRoute() {
   const [isInviting, setIsInviting] = useState(false)
   const canManage = workspace.role === 'admin'
   return (
-    <>
+    <div className="max-w-5xl">
       <PageHeading
         title="People"
         actions={
@@ -29,6 +29,6 @@ export default function PeopleRoute() {
       </PageHeading>
       <PeopleList workspaceId={workspace.id} myUserId={user.id} canManage={canManage} />
       {isInviting && <InviteDialog workspaceId={workspace.id} onClose={() => setIsInviting(false)} />}
-    </>
+    </div>
   )
 }

@@ -8,6 +8,7 @@ import { resetPassword } from '@/features/accounts/api/auth-endpoints'
 import { MIN_PASSWORD_LENGTH, newPasswordProblem } from '@/features/accounts/field-rules'
 import { formErrors } from '@/lib/form-errors'
 import { useSubmission } from '@/features/accounts/hooks/use-submission'
+import { focusFirstInvalid } from '@/lib/focus-first-invalid'
 import { usePageTitle } from '../../use-page-title'
 
 export default function ResetPasswordRoute() {
@@ -20,11 +21,12 @@ export default function ResetPasswordRoute() {
   const { isBusy, error, submit } = useSubmission()
   const { fields, form } = formErrors(error, ['newPassword'])
 
-  const onSubmit = async (event: FormEvent) => {
+  const onSubmit = async (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     const found = newPasswordProblem(password)
     setProblem(found)
-    if (!found && token) setIsDone(await submit(() => resetPassword(token, password)))
+    if (found) return focusFirstInvalid(event.currentTarget)
+    if (token) setIsDone(await submit(() => resetPassword(token, password)))
   }
 
   if (!token)

@@ -8,6 +8,7 @@ import { queryKeys } from '@/lib/query-keys'
 import { changePassword } from '../api/auth-endpoints'
 import { MIN_PASSWORD_LENGTH, newPasswordProblem } from '../field-rules'
 import { formErrors } from '@/lib/form-errors'
+import { focusFirstInvalid } from '@/lib/focus-first-invalid'
 import { useSubmission } from '../hooks/use-submission'
 
 export function ChangePasswordForm() {
@@ -18,14 +19,14 @@ export function ChangePasswordForm() {
   const { fields, form } = formErrors(error, ['currentPassword', 'newPassword'])
   const queryClient = useQueryClient()
 
-  const onSubmit = async (event: FormEvent) => {
+  const onSubmit = async (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     const found = {
       current: current ? null : 'Enter your present password',
       fresh: newPasswordProblem(fresh),
     }
     setProblems(found)
-    if (found.current || found.fresh) return
+    if (found.current || found.fresh) return focusFirstInvalid(event.currentTarget)
     if (!(await submit(() => changePassword(current, fresh)))) return
     setCurrent('')
     setFresh('')

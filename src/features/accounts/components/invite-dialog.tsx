@@ -9,6 +9,7 @@ import { type Role, roleSchema, ROLES } from '@shared/protocol/roles'
 import { useInvite } from '../api/people'
 import { emailProblem } from '../field-rules'
 import { formErrors } from '@/lib/form-errors'
+import { focusFirstInvalid } from '@/lib/focus-first-invalid'
 import { ROLE_DESCRIPTIONS, ROLE_NAMES } from '../role-texts'
 
 const options = ROLES.map((role) => ({ value: role, label: ROLE_NAMES[role] }))
@@ -21,11 +22,11 @@ export function InviteDialog({ workspaceId, onClose }: { workspaceId: string; on
   const { fields, form } = formErrors(error, ['email', 'role'])
   const formId = useId()
 
-  const submit = (event: FormEvent) => {
+  const submit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     const found = emailProblem(email)
     setProblem(found)
-    if (found) return
+    if (found) return focusFirstInvalid(event.currentTarget)
     const address = email.trim()
     mutate(
       { email: address, role },

@@ -9,6 +9,7 @@ import { HttpError } from '@/lib/http-client'
 import { signIn } from '../api/auth-endpoints'
 import { emailProblem } from '../field-rules'
 import { formErrors } from '@/lib/form-errors'
+import { focusFirstInvalid } from '@/lib/focus-first-invalid'
 import { useSubmission } from '../hooks/use-submission'
 import { ResendConfirmation } from './resend-confirmation'
 
@@ -22,11 +23,11 @@ export function SignInForm({ next, onSignedIn }: { next: string | null; onSigned
   // The server says so only to whoever knows the password.
   const isUnconfirmed = error instanceof HttpError && error.status === 403
 
-  const onSubmit = async (event: FormEvent) => {
+  const onSubmit = async (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     const found = { email: emailProblem(email), password: password ? null : 'Enter your password' }
     setProblems(found)
-    if (found.email || found.password) return
+    if (found.email || found.password) return focusFirstInvalid(event.currentTarget)
     if (await submit(() => signIn(email.trim(), password))) onSignedIn()
   }
 

@@ -6,6 +6,7 @@ import { TextField } from '@/components/text-field'
 import { signUp } from '../api/auth-endpoints'
 import { emailProblem, MIN_PASSWORD_LENGTH, nameProblem, newPasswordProblem } from '../field-rules'
 import { formErrors } from '@/lib/form-errors'
+import { focusFirstInvalid } from '@/lib/focus-first-invalid'
 import { useSubmission } from '../hooks/use-submission'
 
 export function SignUpForm({
@@ -23,7 +24,7 @@ export function SignUpForm({
   const { fields, form } = formErrors(error, ['name', 'email', 'password'])
   const set = (change: Partial<typeof values>) => setValues({ ...values, ...change })
 
-  const onSubmit = async (event: FormEvent) => {
+  const onSubmit = async (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     const found = {
       name: nameProblem(values.name),
@@ -31,7 +32,7 @@ export function SignUpForm({
       password: newPasswordProblem(values.password),
     }
     setProblems(found)
-    if (found.name || found.email || found.password) return
+    if (found.name || found.email || found.password) return focusFirstInvalid(event.currentTarget)
     const email = values.email.trim()
     if (await submit(() => signUp({ name: values.name.trim(), email, password: values.password }, next)))
       onSignedUp(email)

@@ -5,6 +5,7 @@ import { Dialog } from '@/components/dialog'
 import { SegmentedControl } from '@/components/segmented-control'
 import { TextField } from '@/components/text-field'
 import { formErrors } from '@/lib/form-errors'
+import { focusFirstInvalid } from '@/lib/focus-first-invalid'
 import type { CreateLayoutBody, LayoutSummary } from '@shared/protocol/layouts'
 import { useCreateLayout } from '../api/change-layouts'
 import type { ReadLayoutFile } from '../read-layout-file'
@@ -54,10 +55,13 @@ export function NewLayoutDialog(props: NewLayoutDialogProps) {
     return read.ok ? { kind: 'file', content: read.content } : 'Mend the file, or choose another one'
   }
 
-  const submit = (event: FormEvent) => {
+  const submit = (event: FormEvent<HTMLFormElement>) => {
     event.preventDefault()
     const from = origin()
-    if (typeof from === 'string') return setProblem(from)
+    if (typeof from === 'string') {
+      setProblem(from)
+      return focusFirstInvalid(event.currentTarget)
+    }
     mutate(
       { name: name.trim() || undefined, project: project.trim() || null, from },
       { onSuccess: onCreated },

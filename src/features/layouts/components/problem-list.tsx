@@ -5,7 +5,7 @@ export function ProblemList({ problems }: { problems: LayoutFileProblem[] }) {
     <ul className="mt-1 grid max-h-60 gap-1 overflow-auto">
       {problems.map(({ path, message }, index) => (
         <li key={index}>
-          {path && <code className="mr-2 font-semibold break-all">{path}</code>}
+          {path && <code className="mr-2 font-sans font-semibold break-all">{path}</code>}
           {message}
         </li>
       ))}
