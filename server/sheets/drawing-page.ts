@@ -1,26 +1,13 @@
 /** The first sheet: the shaft in half section, the item list and the title block. */
 import { halfSection } from '@shared/drawing/half-section-geometry'
-import type { LayoutDocument } from '@shared/layout/layout-document'
 import { drawItemList, itemListHeight } from './item-list'
 import { drawShaftDrawing, planShaftDrawing } from './shaft-drawing'
-import { A3, A4, MARGIN_MM, type Paper, SheetPages, STRIP_HEIGHT_MM } from './sheet-pages'
+import { MARGIN_MM, PAPER, type SheetPages, STRIP_HEIGHT_MM } from './sheet-pages'
 import type { SheetRelease } from './sheet-release'
 import { QUIET, type TextStyle } from './sheet-writer'
 import { drawTitleBlock, TITLE_BLOCK_HEIGHT_MM, TITLE_BLOCK_WIDTH_MM } from './title-block'
 
 const NOTE: TextStyle = { sizePt: 7, colour: QUIET }
-const SMALL_SHAFT_MM = { lengthMm: 230, diameterMm: 60 }
-
-/** A4 where a short shaft with few hubs stands on it at full size; A3 for everything else. */
-export function paperFor(document: LayoutDocument): Paper {
-  const section = halfSection(document)
-  const isSmall =
-    section.toMm - section.fromMm <= SMALL_SHAFT_MM.lengthMm &&
-    2 * section.largestRadiusMm <= SMALL_SHAFT_MM.diameterMm &&
-    section.hubs.length <= 6
-  return isSmall ? A4 : A3
-}
-
 interface DrawingPage {
   scale: string
 }
@@ -33,8 +20,8 @@ export function writeDrawingPage(pages: SheetPages, release: SheetRelease): Draw
   const footHeight = Math.max(TITLE_BLOCK_HEIGHT_MM, itemListHeight(release.document, listWidth))
   const section = halfSection(release.document)
   const planned = planShaftDrawing(writer, section, {
-    left: frame.left + 6,
-    right: frame.right - 6,
+    left: frame.left + 4,
+    right: frame.right - 4,
     top: frame.top + 12,
     bottom: foot - footHeight - 4,
   })
@@ -69,8 +56,8 @@ export function writeTitleBlock(
   drawTitleBlock(
     pages.writer,
     release,
-    pages.paper.widthMm - MARGIN_MM,
+    PAPER.widthMm - MARGIN_MM,
     pages.frame.bottom - STRIP_HEIGHT_MM,
-    { ...about, paper: pages.paper.name },
+    about,
   )
 }

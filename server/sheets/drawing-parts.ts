@@ -42,14 +42,12 @@ function drawShaft(writer: SheetWriter, frame: DrawingFrame, section: HalfSectio
     // The edge of a step runs on to the axis where the shaft is seen from outside.
     const isStep = part.outerRadiusMm !== next.outerRadiusMm
     if (isStep) writer.line({ x, y: paperY(frame, -thinner) }, { x, y: frame.axisY }, EDGE)
-    const upperEnd = Math.max(part.boreRadiusMm, next.boreRadiusMm)
-    if (isStep && upperEnd === 0) writer.line({ x, y: paperY(frame, thinner) }, { x, y: frame.axisY }, EDGE)
-    if (part.boreRadiusMm !== next.boreRadiusMm)
-      writer.line(
-        { x, y: paperY(frame, part.boreRadiusMm) },
-        { x, y: paperY(frame, next.boreRadiusMm) },
-        EDGE,
-      )
+    // Above the axis: the shoulder of a bore where both sides are cut, else the whole face.
+    const [bore, nextBore] = [part.boreRadiusMm, next.boreRadiusMm]
+    const isCutThrough = bore > 0 && nextBore > 0
+    if (bore === nextBore && (isCutThrough || !isStep)) return
+    const [from, to] = isCutThrough ? [bore, nextBore] : [thinner, 0]
+    writer.line({ x, y: paperY(frame, from) }, { x, y: paperY(frame, to) }, EDGE)
   })
 }
 

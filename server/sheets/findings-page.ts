@@ -32,7 +32,7 @@ export function writeFindingsPages(pages: SheetPages, release: SheetRelease): vo
       { head: ['Finding'], width: 34 },
       { head: ['Where'], width: 60 },
       { head: ['Load case'], width: 46 },
-      { head: ['Value / limit'], width: 36, align: 'right' },
+      { head: ['Value / limit'], width: 36 },
       { head: ['Why it is accepted'], width: 130 },
       { head: ['Accepted by, at'], width: 48 },
     ]
@@ -76,7 +76,7 @@ const FINDING_COLUMNS: TableColumn[] = [
   { head: ['Finding'], width: 34 },
   { head: ['Where'], width: 54 },
   { head: ['Load case'], width: 40 },
-  { head: ['Value / limit'], width: 34, align: 'right' },
+  { head: ['Value / limit'], width: 34 },
   { head: ['Cause'], width: 92 },
   { head: ['What would mend it'], width: 82 },
 ]

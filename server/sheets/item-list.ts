@@ -11,7 +11,7 @@ const ROW_MM = 4.2
 const HEAD_MM = 5
 const LEAST_COLUMN_MM = 84
 const LEAST_ROWS = 8
-const MOST_ROWS = 14
+const MOST_ROWS = 16
 
 /** Words for a fit as drawings write it: classes, or limits of interference. */
 export function fitWords(fit: Hub['fit']): string {

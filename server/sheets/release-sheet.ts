@@ -1,5 +1,5 @@
 /** The release sheet: a PDF of the stored release. The same release always gives the same bytes. */
-import { paperFor, writeDrawingPage, writeTitleBlock } from './drawing-page'
+import { writeDrawingPage, writeTitleBlock } from './drawing-page'
 import { writeFindingsPages } from './findings-page'
 import { writeLoadPages } from './load-page'
 import { writeMethodPages } from './method-page'
@@ -17,7 +17,7 @@ export async function drawReleaseSheet(release: SheetRelease): Promise<Buffer> {
     keywords: `${release.documentHash} ${release.releaseHash}`,
     createdAt: new Date(release.frozenAt),
   })
-  const pages = new SheetPages(writer, paperFor(release.document), release)
+  const pages = new SheetPages(writer, release)
   const { scale } = writeDrawingPage(pages, release)
   for (const writePages of [
     writeSchedulePages,

@@ -17,7 +17,7 @@ const COLUMNS: TableColumn[] = [
   { head: ['Hub, material'], width: 46 },
   { head: ['Seat, mm'], width: 27 },
   { head: ['Fit', 'Interference, µm'], width: 29 },
-  { head: ['Interference window, µm as made', 'slips below · stands above'], width: 66 },
+  { head: ['Interference window', 'as made, µm'], width: 66 },
   { head: ['Pressure', 'min / max, MPa'], width: 19, align: 'right' },
   { head: ['Torque held', 'required, N·m'], width: 21, align: 'right' },
   { head: ['Axial held', 'required, kN'], width: 19, align: 'right' },
@@ -72,8 +72,8 @@ function hubRow(
   const { requiredUm, requiredCause, permissibleUm, permissibleCause } = result.window
   const values = windowValuesOf(result)
   const causes = [
-    requiredUm === null ? '' : `Slips below ${whole(requiredUm)}: ${requiredCause}.`,
-    permissibleUm === null ? '' : `Stands up to ${whole(permissibleUm)}: ${permissibleCause}.`,
+    requiredUm === null ? '' : `${whole(requiredUm)} µm: ${requiredCause}.`,
+    permissibleUm === null ? '' : `${whole(permissibleUm)} µm: ${permissibleCause}.`,
     result.window.isEmpty ? 'The window is empty.' : '',
   ].filter((text) => text !== '')
   const hubSafety = extreme(Math.min, [

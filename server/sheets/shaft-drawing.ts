@@ -14,7 +14,7 @@ export interface DrawingArea {
 }
 
 /** Room for the words left of the diameter rows and for the ends of the centre line. */
-const SIDE_ROOM_MM = 14
+const SIDE_ROOM_MM = 11
 
 interface Planned {
   label: string

@@ -3,13 +3,8 @@ import { utc } from './sheet-format'
 import type { SheetRelease } from './sheet-release'
 import { BAD, HAIRLINE, QUIET, SheetWriter, type TextStyle, THICK_MM } from './sheet-writer'
 
-export interface Paper {
-  name: 'A4' | 'A3'
-  widthMm: number
-  heightMm: number
-}
-export const A4: Paper = { name: 'A4', widthMm: 297, heightMm: 210 }
-export const A3: Paper = { name: 'A3', widthMm: 420, heightMm: 297 }
+/** One size for every sheet: the drawing at a large scale and the schedule in one row a hub need the room. */
+export const PAPER = { name: 'A3', widthMm: 420, heightMm: 297 } as const
 
 /** Filing margin on the left, frame elsewhere (ISO 5457, from memory). */
 export const FILING_MARGIN_MM = 20
@@ -34,7 +29,6 @@ export class SheetPages {
 
   constructor(
     readonly writer: SheetWriter,
-    readonly paper: Paper,
     private readonly release: SheetRelease,
   ) {}
 
@@ -42,8 +36,8 @@ export class SheetPages {
     return {
       left: FILING_MARGIN_MM,
       top: MARGIN_MM,
-      right: this.paper.widthMm - MARGIN_MM,
-      bottom: this.paper.heightMm - MARGIN_MM,
+      right: PAPER.widthMm - MARGIN_MM,
+      bottom: PAPER.heightMm - MARGIN_MM,
     }
   }
   get left(): number {
@@ -57,7 +51,7 @@ export class SheetPages {
   }
 
   addPage(): void {
-    this.writer.addPage(this.paper.widthMm, this.paper.heightMm)
+    this.writer.addPage(PAPER.widthMm, PAPER.heightMm)
     const { left, top, right, bottom } = this.frame
     this.writer.rect(left, top, right - left, bottom - top, { stroke: { widthMm: 2 * THICK_MM } })
     this.y = top + INNER_GAP_MM

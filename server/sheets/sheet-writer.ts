@@ -101,19 +101,14 @@ export class SheetWriter {
     return this.ended
   }
 
-  /** Width in millimetres. Widths grow with the size, so each text is laid out once per weight. */
+  /** Width in millimetres. */
   measure(text: string, style: TextStyle): number {
-    const weight = style.weight ?? 'regular'
-    const key = `${weight} ${text}`
-    let widthEm = this.widthsEm.get(key)
-    if (widthEm === undefined) {
-      widthEm = 0
-      for (const run of textRuns(text, weight)) {
-        if (run.kind === 'sign') widthEm += DRAWN_SIGNS[run.sign].widthEm
-        else widthEm += this.runWidth(run.text, run.fontName, 100) * (run.isLowered ? LOWERED_SIZE : 1) * 0.01
-      }
-      this.widthsEm.set(key, widthEm)
-    }
+    let widthEm = 0
+    for (const run of textRuns(text, style.weight ?? 'regular'))
+      widthEm +=
+        run.kind === 'sign'
+          ? DRAWN_SIGNS[run.sign].widthEm
+          : this.runWidthEm(run.text, run.fontName) * (run.isLowered ? LOWERED_SIZE : 1)
     return (widthEm * style.sizePt) / PT_PER_MM
   }
 
@@ -131,8 +126,8 @@ export class SheetWriter {
         continue
       }
       const size = style.sizePt * (run.isLowered ? LOWERED_SIZE : 1)
-      const width = this.runWidth(run.text, run.fontName, size)
-      this.pdf.fillColor(colour)
+      const width = this.runWidthEm(run.text, run.fontName) * size
+      this.pdf.font(run.fontName).fontSize(size).fillColor(colour)
       this.pdf.text(run.text, at, baseline + (run.isLowered ? style.sizePt * LOWERED_DROP : 0), {
         lineBreak: false,
         baseline: 'alphabetic',
@@ -282,9 +277,15 @@ export class SheetWriter {
     this.pdf.restore()
   }
 
-  /** In points; leaves the font and the size set. */
-  private runWidth(text: string, fontName: string, sizePt: number): number {
-    return this.pdf.font(fontName).fontSize(sizePt).widthOfString(text, digitFeatures(text))
+  /** Widths grow with the size, so each run is laid out once. */
+  private runWidthEm(text: string, fontName: string): number {
+    const key = `${fontName} ${text}`
+    let widthEm = this.widthsEm.get(key)
+    if (widthEm === undefined) {
+      widthEm = this.pdf.font(fontName).fontSize(100).widthOfString(text, digitFeatures(text)) / 100
+      this.widthsEm.set(key, widthEm)
+    }
+    return widthEm
   }
 
   private longestPrefix(text: string, widthMm: number, style: TextStyle): number {

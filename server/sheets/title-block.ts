@@ -1,5 +1,6 @@
 /** The title block of the first sheet: 180 mm wide with the data fields of ISO 7200 (from memory). */
 import { safety, utc } from './sheet-format'
+import { PAPER } from './sheet-pages'
 import type { SheetRelease } from './sheet-release'
 import { BAD, QUIET, type SheetWriter, type TextStyle, THICK_MM, THIN_MM } from './sheet-writer'
 
@@ -17,7 +18,7 @@ export function drawTitleBlock(
   release: SheetRelease,
   right: number,
   bottom: number,
-  about: { scale: string; sheetCount: number; paper: string },
+  about: { scale: string; sheetCount: number },
 ): void {
   const left = right - TITLE_BLOCK_WIDTH_MM
   const top = bottom - TITLE_BLOCK_HEIGHT_MM
@@ -83,7 +84,7 @@ export function drawTitleBlock(
 
   cell(3, 0, 92, 'Release', release.id)
   cell(3, 92, 16, 'Scale', about.scale, STRONG)
-  cell(3, 108, 12, 'Paper', about.paper)
+  cell(3, 108, 12, 'Paper', PAPER.name)
   cell(3, 120, 12, 'Unit', 'mm')
   const projectionX = left + 132
   const lastTop = tops[3] ?? top
