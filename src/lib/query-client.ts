@@ -9,9 +9,10 @@ const isWorthRetrying = (error: unknown) =>
   !(error instanceof HttpError) || error.status === 0 || error.status >= 502
 
 export function createQueryClient(): QueryClient {
-  // Any 401 means the session ended elsewhere: asking who we are again leads to the sign-in page.
+  // A 401 means the session ended elsewhere: asking who we are again leads to the sign-in page. What is
+  // on screen stays until that is answered.
   const onError = (error: unknown) => {
-    if (isSignedOut(error)) void client.resetQueries({ queryKey: queryKeys.me })
+    if (isSignedOut(error)) void client.invalidateQueries({ queryKey: queryKeys.me })
   }
   const client: QueryClient = new QueryClient({
     queryCache: new QueryCache({

@@ -3,6 +3,7 @@ import { Button } from '@/components/button'
 import { Icon } from '@/components/icon'
 import { InviteDialog } from '@/features/accounts/components/invite-dialog'
 import { PeopleList } from '@/features/accounts/components/people-list'
+import { WorkspaceNameForm } from '@/features/accounts/components/workspace-name-form'
 import { PageHeading } from '../../page-heading'
 import { useSignedIn, useWorkspace } from '../../workspace-context'
 
@@ -28,6 +29,7 @@ export default function PeopleRoute() {
           : 'Admins invite people and change roles.'}
       </PageHeading>
       <PeopleList workspaceId={workspace.id} myUserId={user.id} canManage={canManage} />
+      {canManage && <WorkspaceNameForm key={workspace.id} workspaceId={workspace.id} name={workspace.name} />}
       {isInviting && <InviteDialog workspaceId={workspace.id} onClose={() => setIsInviting(false)} />}
     </div>
   )

@@ -58,12 +58,8 @@ export function LayoutCard({ layout, canEdit }: { layout: LayoutSummary; canEdit
         </TitleBlockCell>
         <TitleBlockCell term="Last edit">
           <span className="block truncate">{layout.editedByName}</span>
-          <time
-            dateTime={layout.editedAt}
-            title={formatDateTime(layout.editedAt)}
-            className="relative z-10 block truncate font-normal text-quiet"
-          >
-            {formatAgo(layout.editedAt)}
+          <time dateTime={layout.editedAt} className="block font-normal text-quiet">
+            {formatAgo(layout.editedAt)}, {formatDateTime(layout.editedAt)}
           </time>
         </TitleBlockCell>
       </dl>
