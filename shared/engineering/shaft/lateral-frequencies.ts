@@ -1,12 +1,12 @@
-import { addEntry, bandMatrix, fixFreedom, type BandMatrix } from '../linear-algebra/band-matrix'
+import { fixFreedom } from '../linear-algebra/band-matrix'
 import { lowestEigenvalues } from '../linear-algebra/lowest-eigenvalues'
 import type { AngularSpeed } from '../quantities/quantity'
 import { radianPerSecond } from '../quantities/units'
-import { beamMesh, nearestNode, type BeamMesh } from './beam-mesh'
+import { beamMesh, nearestNode } from './beam-mesh'
 import { applySupports, stiffnessMatrix } from './beam-solver'
+import { lateralMassMatrix } from './lateral-mass'
 import { requireShaft, shaftLength, type CarriedMass, type ShaftModel, type Support } from './shaft-model'
 
-const HALF_BANDWIDTH = 3
 /** Elements no longer than this share of the shaft keep the third mode within 0.1 %. */
 const ELEMENT_SHARE = 1 / 16
 
@@ -38,36 +38,10 @@ export function lateralFrequencies(
   const nodes = supports.map((support) => nearestNode(mesh, support.station))
   if (new Set(nodes).size < 2) return []
   const stiffness = stiffnessMatrix(mesh)
-  const mass = massMatrix(mesh, masses)
+  const mass = lateralMassMatrix(mesh, masses)
   applySupports(stiffness, supports, nodes)
   supports.forEach((support, index) => {
     if (support.stiffness === null) fixFreedom(mass, (nodes[index] as number) * 2, 0)
   })
   return lowestEigenvalues(stiffness, mass, count).map((square) => radianPerSecond(Math.sqrt(square)))
-}
-
-/** Consistent mass of cubic elements: 156, 22h, 54, −13h, 4h², −3h² times mass per length times h/420. */
-function massMatrix(mesh: BeamMesh, masses: readonly CarriedMass[]): BandMatrix {
-  const matrix = bandMatrix(mesh.nodes.length * 2, HALF_BANDWIDTH)
-  for (let element = 0; element < mesh.massPerLength.length; element += 1) {
-    const h = (mesh.nodes[element + 1] as number) - (mesh.nodes[element] as number)
-    const m = ((mesh.massPerLength[element] as number) * h) / 420
-    const first = element * 2
-    addEntry(matrix, first, first, 156 * m)
-    addEntry(matrix, first, first + 1, 22 * h * m)
-    addEntry(matrix, first, first + 2, 54 * m)
-    addEntry(matrix, first, first + 3, -13 * h * m)
-    addEntry(matrix, first + 1, first + 1, 4 * h * h * m)
-    addEntry(matrix, first + 1, first + 2, 13 * h * m)
-    addEntry(matrix, first + 1, first + 3, -3 * h * h * m)
-    addEntry(matrix, first + 2, first + 2, 156 * m)
-    addEntry(matrix, first + 2, first + 3, -22 * h * m)
-    addEntry(matrix, first + 3, first + 3, 4 * h * h * m)
-  }
-  for (const carried of masses) {
-    const freedom = nearestNode(mesh, carried.station) * 2
-    addEntry(matrix, freedom, freedom, carried.mass)
-    addEntry(matrix, freedom + 1, freedom + 1, carried.diametralInertia)
-  }
-  return matrix
 }

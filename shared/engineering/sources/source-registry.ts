@@ -287,6 +287,13 @@ export const SOURCE_REGISTRY = [
     clauses: 'Newton cooling, Stefan-Boltzmann law, thermal contact conductance',
     isFromMemory: true,
   },
+  {
+    id: 'rotor-dynamics',
+    citation: 'Gyroscopic whirl of rotors on isotropic bearings, as in any text on rotor dynamics',
+    edition: 'common practice',
+    clauses: 'K ± ωΩG − ω²M, synchronous unbalance response, de Laval (Jeffcott) rotor',
+    isFromMemory: true,
+  },
 ] as const satisfies readonly Source[]
 
 export type SourceId = (typeof SOURCE_REGISTRY)[number]['id']
