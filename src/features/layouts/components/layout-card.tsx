@@ -4,7 +4,7 @@ import { Avatar } from '@/components/avatar'
 import { Icon } from '@/components/icon'
 import { paths } from '@/config/paths'
 import { ShaftThumbnail } from '@/drawings/shaft-thumbnail'
-import { formatAgo, formatDateTime } from '@/lib/format-time'
+import { formatAgoAndWhen } from '@/lib/format-time'
 import type { LayoutSummary } from '@shared/protocol/layouts'
 import { STATUS_NAMES } from '../status-texts'
 import { LayoutMenu } from './layout-menu'
@@ -59,7 +59,7 @@ export function LayoutCard({ layout, canEdit }: { layout: LayoutSummary; canEdit
         <TitleBlockCell term="Last edit">
           <span className="block truncate">{layout.editedByName}</span>
           <time dateTime={layout.editedAt} className="block font-normal text-quiet">
-            {formatAgo(layout.editedAt)}, {formatDateTime(layout.editedAt)}
+            {formatAgoAndWhen(layout.editedAt)}
           </time>
         </TitleBlockCell>
       </dl>
