@@ -37,7 +37,7 @@ export function InterferenceWindow({ values, size, units, scale }: InterferenceW
   const geometry = windowGeometry(values, usedScale, WIDTH)
   const label = windowSentence(values)
   return size === 'row' ? (
-    <svg role="img" aria-label={label} className="block h-4 w-full min-w-32 overflow-visible">
+    <svg role="img" aria-label={label} className="block h-4 w-full overflow-visible">
       <Strip geometry={geometry} y={2} height={12} barHeight={7} />
     </svg>
   ) : (
@@ -66,8 +66,16 @@ function FullWindow({ values, geometry, scale, label, units }: FullWindowProps) 
     geometry.bar === null || minUm === null || maxUm === null
       ? []
       : [
-          { text: number(minUm), at: geometry.bar.from },
-          { text: number(maxUm), at: geometry.bar.to },
+          {
+            text: number(minUm),
+            at: geometry.bar.from,
+            isOutside: geometry.state === 'empty' || geometry.barBelow !== null,
+          },
+          {
+            text: number(maxUm),
+            at: geometry.bar.to,
+            isOutside: geometry.state === 'empty' || geometry.barAbove !== null,
+          },
         ]
   const markTexts = [
     requiredUm === null || geometry.requiredMark === null
@@ -90,7 +98,6 @@ function FullWindow({ values, geometry, scale, label, units }: FullWindowProps) 
   const markRows = Math.max(0, ...markLabels.map(({ row }) => row))
   const top = 14 + barRows * ROW_PX
   const height = 22
-  const isInside = geometry.state === 'inside'
   const unit = displayUnit('interference', units)
   const tickText = (um: number) =>
     formatNumber(Number(fromStored(um, unit).toPrecision(3)), units === 'inch' ? 1 : 0)
@@ -109,7 +116,7 @@ function FullWindow({ values, geometry, scale, label, units }: FullWindowProps) 
           x={percent(at)}
           y={top - 5 - row * ROW_PX}
           textAnchor="middle"
-          className={`font-bold ${isInside ? 'fill-good' : 'fill-bad'}`}
+          className={`font-bold ${barTexts[index]?.isOutside === true ? 'fill-bad' : 'fill-good'}`}
         >
           {text}
         </text>

@@ -1,9 +1,15 @@
-/** Who else is typing in a field. */
+/** Who else is typing in a field: the first name, short enough for a narrow label. */
 export function EditorsBadge({ names }: { names: readonly string[] }) {
   if (names.length === 0) return null
+  const firstNames = names.map((name) => name.split(' ')[0]).join(', ')
   return (
-    <span className="rounded-full bg-good-soft px-1.5 text-[11px] leading-4 font-semibold text-good">
-      {names.map((name) => name.split(' ')[0]).join(', ')} {names.length === 1 ? 'is' : 'are'} editing
+    <span
+      title={`${firstNames} ${names.length === 1 ? 'is' : 'are'} editing this`}
+      className="inline-flex min-w-0 items-center gap-1 font-semibold text-good"
+    >
+      <span aria-hidden="true" className="size-1.5 shrink-0 rounded-full bg-good" />
+      <span className="truncate">{firstNames}</span>
+      <span className="sr-only">{names.length === 1 ? 'is' : 'are'} editing</span>
     </span>
   )
 }

@@ -60,13 +60,13 @@ function ScheduleRowContent({ row, layout, scale, units }: ScheduleRowViewProps)
   return (
     <tr
       aria-selected={isSelected}
-      className={isSelected ? 'bg-steel-soft' : isHovered ? 'bg-paper' : ''}
+      className={isSelected ? 'bg-steel-soft' : isHovered ? 'bg-paper' : 'bg-card'}
       onClick={choose}
       onFocus={() => !isSelected && select([hub.id])}
       onPointerEnter={() => hover(hub.id)}
       onPointerLeave={() => hover(null)}
     >
-      <Cell className="py-1!">
+      <Cell className="px-1.5! py-1! pl-4!">
         <button
           type="button"
           aria-pressed={isSelected}
@@ -76,12 +76,15 @@ function ScheduleRowContent({ row, layout, scale, units }: ScheduleRowViewProps)
           {number}
         </button>
       </Cell>
-      <th scope="row" className="border-b border-hairline py-1 pr-2 text-left font-normal">
+      <th
+        scope="row"
+        className="sticky left-0 w-[22%] border-b border-hairline bg-inherit py-1 pr-2 text-left font-normal"
+      >
         <LayoutTextField
           label={`Name of ${hub.name}`}
           arrangement="cell"
           address={hubAddress([hub], 'name')}
-          className="min-w-36"
+          className="min-w-44"
         />
       </th>
       <NumberCell label={`Left face of ${hub.name}`} row={row} field="stationMm" min={-20_000} max={20_000} />
@@ -93,14 +96,14 @@ function ScheduleRowContent({ row, layout, scale, units }: ScheduleRowViewProps)
         min={0}
         max={10_000}
       />
-      <Cell align="right" className="py-1! tabular-nums">
+      <Cell align="right" className="px-1.5! py-1! tabular-nums">
         {seat == null ? (
           <span className="text-bad">no seat</span>
         ) : (
           formatGiven(Number(seat.toFixed(3)), 'length', units).number
         )}
       </Cell>
-      <Cell className="py-1! pl-1!">
+      <Cell className="px-0! py-1!">
         <LayoutTextField
           label={`Fit of ${hub.name}`}
           arrangement="cell"
@@ -110,14 +113,14 @@ function ScheduleRowContent({ row, layout, scale, units }: ScheduleRowViewProps)
           className="w-24"
         />
       </Cell>
-      <Cell align="right" className="py-1! whitespace-nowrap tabular-nums">
+      <Cell align="right" className="px-1.5! py-1! whitespace-nowrap tabular-nums">
         {interferenceText(row, units)}
       </Cell>
-      <Cell className="py-1!">
+      <Cell className="px-1.5! py-1!">
         {values === null ? (
           <span className="text-quiet">calculating</span>
         ) : (
-          <div className="grid grid-cols-[minmax(7rem,1fr)_7.5rem] items-center gap-2">
+          <div className="grid grid-cols-[minmax(7rem,1fr)_6.75rem] items-center gap-3">
             <InterferenceWindow values={values} size="row" scale={scale} units={units} />
             <span className="truncate text-xs" title={windowStateWords(values)}>
               <WindowSign state={windowState(values)} /> {windowStateWords(values)}
@@ -126,7 +129,7 @@ function ScheduleRowContent({ row, layout, scale, units }: ScheduleRowViewProps)
         )}
       </Cell>
       {safetyCells(row, layout).map(({ quantity, label, value, limit, text }) => (
-        <Cell key={quantity} align="right" className="py-1! whitespace-nowrap">
+        <Cell key={quantity} align="right" className="px-1.5! py-1! whitespace-nowrap">
           <JudgedNumber
             text={text}
             verdict={safetyVerdict(value, limit)}
@@ -139,11 +142,11 @@ function ScheduleRowContent({ row, layout, scale, units }: ScheduleRowViewProps)
           />
         </Cell>
       ))}
-      <Cell align="right" className="py-1! whitespace-nowrap tabular-nums">
+      <Cell align="right" className="px-1.5! py-1! whitespace-nowrap tabular-nums">
         {isTooHot(row) && <span className="font-bold text-bad">✕ over limit </span>}
         {joiningText(row, units)}
       </Cell>
-      <Cell className="py-1! whitespace-nowrap">
+      <Cell className="px-1.5! py-1! whitespace-nowrap">
         {result?.assembly.order === null ? (
           <span className="font-bold text-bad">✕ blocked</span>
         ) : (
@@ -168,7 +171,7 @@ function NumberCell({
   max: number
 }) {
   return (
-    <Cell align="right" className="py-1! pr-1.5! pl-1!">
+    <Cell align="right" className="px-0! py-1!">
       <LayoutQuantityField
         label={label}
         kind="length"
@@ -177,7 +180,7 @@ function NumberCell({
         min={min}
         isMinExclusive={field !== 'stationMm'}
         max={max}
-        className="ml-auto w-20"
+        className="ml-auto w-18"
       />
     </Cell>
   )

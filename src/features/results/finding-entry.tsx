@@ -38,7 +38,7 @@ export function FindingEntry({ finding, document }: FindingEntryProps) {
         onPointerLeave={() => hover(null)}
         className={`block w-full px-4 py-2 text-left text-sm hover:bg-paper ${isSelected ? 'bg-steel-soft' : ''}`}
       >
-        <span className="flex flex-wrap items-baseline justify-between gap-x-4">
+        <span className="flex max-w-3xl flex-wrap items-baseline justify-between gap-x-4">
           <span className="font-semibold">
             <span className={SEVERITY_WORDS[severity].ink}>{FINDING_WORDS[code]}</span>
             <span className="sr-only"> ({SEVERITY_WORDS[severity].one})</span>

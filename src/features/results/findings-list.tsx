@@ -8,7 +8,6 @@ import type { Severity } from '@shared/recalculation/layout-results'
 import { findingKey } from './announcement'
 import { FindingEntry } from './finding-entry'
 import { SEVERITIES, SEVERITY_WORDS } from './finding-words'
-import { FindingsAnnouncer } from './findings-announcer'
 import { useLasting } from './use-lasting'
 
 export function FindingsList() {
@@ -34,7 +33,6 @@ export function FindingsList() {
 
   return (
     <section aria-label="Findings" aria-busy={isUpdating}>
-      <FindingsAnnouncer />
       <div className="flex flex-wrap items-center gap-2 px-4 pt-3">
         {groups.map(({ severity, findings: list }) => {
           const { heading, sign, ink } = SEVERITY_WORDS[severity]

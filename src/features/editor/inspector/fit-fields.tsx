@@ -1,4 +1,6 @@
+import { Button } from '@/components/button'
 import { LayoutChoiceField } from '@/fields/layout-choice-field'
+import { useLayoutField } from '@/fields/layout-field'
 import { LayoutQuantityField } from '@/fields/layout-quantity-field'
 import { hubAddress } from '@/fields/part-address'
 import { formatNumber, formatResultPair } from '@/lib/format-quantity'
@@ -77,7 +79,12 @@ export function FitFields({ hub, seatDiameterMm, band, window, units }: FitField
           </>
         )}
       </FieldGrid>
-      {hub.fit.kind === 'iso286' && <LimitsLine sizeMm={sizeMm} hole={hub.fit.hole} shaft={hub.fit.shaft} />}
+      {hub.fit.kind === 'iso286' && (
+        <>
+          <LimitsLine sizeMm={sizeMm} hole={hub.fit.hole} shaft={hub.fit.shaft} />
+          <TakeFit hub={hub} fit={hub.fit} sizeMm={sizeMm} window={window} units={units} />
+        </>
+      )}
       {hub.fit.kind === 'limits' && (
         <p className="mt-1 text-xs text-quiet">Diametral; type r before a radial value, such as r 20 µm.</p>
       )}
@@ -140,6 +147,38 @@ function IsoClasses({
         ]}
       />
     </>
+  )
+}
+
+/** Where the present fit lies outside the window: one press for the loosest one of its grade inside. */
+function TakeFit({
+  hub,
+  fit,
+  sizeMm,
+  window,
+  units,
+}: Omit<FitFieldsProps, 'seatDiameterMm' | 'band'> & {
+  fit: { hole: string; shaft: string }
+  sizeMm: number
+}) {
+  const field = useLayoutField(hubAddress([hub], 'fit'))
+  const fits = interferenceFits(sizeMm, fit.hole)
+  const present = fits.find(({ shaft }) => shaft === fit.shaft)
+  const hasWindow = window.requiredUm !== null || window.permissibleUm !== null
+  if (field.isReadOnly || !hasWindow || (present !== undefined && windowMargin(present, window) >= 0))
+    return null
+  const grade = fit.shaft.replace(/^\D+/, '')
+  const better = fits.find((other) => other.shaft.endsWith(grade) && windowMargin(other, window) >= 0)
+  if (better === undefined) return null
+  return (
+    <Button
+      size="sm"
+      className="mt-1.5"
+      onClick={() => field.commit({ kind: 'iso286', hole: better.hole, shaft: better.shaft })}
+    >
+      Take {better.hole}/{better.shaft},{' '}
+      {formatResultPair(better.minUm, better.maxUm, 'interference', units, ' … ').text}
+    </Button>
   )
 }
 

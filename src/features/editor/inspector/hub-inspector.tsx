@@ -138,7 +138,7 @@ function WindowBlock({ result, units }: { result: HubResult; units: UnitSystem }
   const { window } = result
   return (
     <section aria-label="Interference window" className="mt-3">
-      <h3 className="text-[13px] text-quiet">Interference window, {units === 'inch' ? 'thou' : 'µm'}</h3>
+      <h3 className="mb-1 text-[13px] text-quiet">Interference window, {units === 'inch' ? 'thou' : 'µm'}</h3>
       <InterferenceWindow values={values} size="full" units={units} />
       <dl className="mt-1 grid grid-cols-[auto_1fr] gap-x-2 text-xs leading-5">
         {window.requiredUm !== null && (

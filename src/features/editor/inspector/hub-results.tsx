@@ -94,13 +94,15 @@ export function GripResults({ result, shown, units }: Shown) {
         reference={inCase(id, shown, 'pressureMin')}
       />
       <ResultRow
-        label="Torque capacity / required"
+        label="Torque held / required"
+        name="torque capacity"
         value={formatResultPair(shown.torqueCapacityNm, shown.requiredTorqueNm, 'torque', units).text}
         reference={inCase(id, shown, 'torqueCapacity')}
         safety={{ value: shown.torqueSafety, limit, reference: inCase(id, shown, 'torqueSafety') }}
       />
       <ResultRow
-        label="Axial capacity / required"
+        label="Axial held / required"
+        name="axial capacity"
         value={formatResultPair(shown.axialCapacityN, shown.requiredAxialN, 'force', units).text}
         reference={inCase(id, shown, 'axialCapacity')}
         safety={{ value: shown.axialSafety, limit, reference: inCase(id, shown, 'axialSafety') }}

@@ -41,7 +41,7 @@ export function ResultRow({ label, name, value, reference, safety }: ResultRowPr
   return (
     <div className="flex items-baseline justify-between gap-3 border-b border-dashed border-hairline py-1 text-sm">
       <span className="text-quiet">{label}</span>
-      <span className="text-right font-semibold tabular-nums">
+      <span className="text-right font-semibold whitespace-nowrap tabular-nums">
         {value !== '' && <Openable reference={reference} label={`formula of ${spoken}`} text={value} />}
         {safety && (
           <span className={value === '' ? '' : 'ml-2'}>

@@ -36,9 +36,5 @@ export function Inspector() {
     content = <SectionInspector key={section.id} section={section} layout={layout} units={units} />
   else content = <LayoutInspector layout={layout} units={units} />
 
-  return (
-    <aside aria-label="Inspector" className="px-4 py-3">
-      {content}
-    </aside>
-  )
+  return <div className="px-4 py-3">{content}</div>
 }

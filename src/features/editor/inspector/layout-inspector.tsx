@@ -39,9 +39,10 @@ export function LayoutInspector({ layout, units }: { layout: LayoutDocument; uni
           <p className="mt-1 text-[13px]">
             <span className={count('fails') > 0 ? 'font-semibold text-bad' : ''}>
               {count('fails') > 0 && <span aria-hidden="true">✕ </span>}
-              {count('fails')} fail
+              {count('fails')} failing
             </span>
-            , {count('warns')} warn, {count('notes')} note
+            , {count('warns')} {count('warns') === 1 ? 'warning' : 'warnings'}, {count('notes')}{' '}
+            {count('notes') === 1 ? 'note' : 'notes'}
           </p>
         )}
       </header>
