@@ -40,20 +40,24 @@ export function Drawing({ document, viewExtras, letsPageScroll = false, overlay 
   const extentOf = useCallback((partId: string) => partExtent(document, partId), [document])
 
   return (
-    <div className="relative flex min-h-0 min-w-0 flex-1">
-      <LayoutCanvas
-        document={document}
-        driver={driver}
-        onCursor={shareCursor}
-        onContextMenu={setMenuPlace}
-        letsPageScroll={letsPageScroll}
-      >
-        {overlay?.({ view, extentOf })}
-      </LayoutCanvas>
-      <ToolList />
-      <StatusLine />
-      <ViewControls>{viewExtras}</ViewControls>
-      {menuPlace && <PartMenu place={menuPlace} onClose={closeMenu} />}
+    <div className="flex min-h-0 min-w-0 flex-1 flex-col">
+      <div className="relative flex min-h-0 min-w-0 flex-1">
+        <LayoutCanvas
+          document={document}
+          driver={driver}
+          onCursor={shareCursor}
+          onContextMenu={setMenuPlace}
+          letsPageScroll={letsPageScroll}
+        >
+          {overlay?.({ view, extentOf })}
+        </LayoutCanvas>
+        <ToolList />
+        {menuPlace && <PartMenu place={menuPlace} onClose={closeMenu} />}
+      </div>
+      <div className="flex h-9 shrink-0 items-center gap-3 border-t border-hairline pr-1 pl-3">
+        <StatusLine document={document} />
+        <ViewControls>{viewExtras}</ViewControls>
+      </div>
     </div>
   )
 }

@@ -26,13 +26,15 @@ export function EditorProvider({ children }: { children: ReactNode }) {
   useShortcuts(actions.context, actions.nudger)
   useSelectionUpkeep()
 
-  useEffect(() => {
-    useViewStore.setState({ isWhole: true, bounds: null, hoverStationMm: null })
-    return () => {
+  // The next layout starts afresh. Children have measured themselves by now, so nothing is reset on opening.
+  useEffect(
+    () => () => {
       actions.driver.dispose()
       useSelectionStore.getState().clear()
-    }
-  }, [actions])
+      useViewStore.setState({ isWhole: true, bounds: null, hoverStationMm: null })
+    },
+    [actions],
+  )
 
   // What this person has selected is drawn in the other windows.
   useEffect(

@@ -4,7 +4,9 @@
  */
 import { useMemo } from 'react'
 import type { Finding, FindingCode, LayoutResults } from '@shared/recalculation/layout-results'
+import { formatSafety } from '@/lib/format-quantity'
 import { useResultsStore } from '@/stores/results-store'
+import { isWorst } from '@/stores/shown-load-case'
 
 export type PartVerdict = 'holds' | 'warns' | 'fails' | 'unknown'
 
@@ -58,21 +60,36 @@ const MISPLACED: ReadonlySet<FindingCode> = new Set(['no-seat', 'seat-step', 'bo
 
 const RANK = { fails: 2, warns: 1, notes: 0 } as const
 
+/** How near a finding is to, or how far beyond, its limit: less is worse. Findings without numbers lead. */
+const margin = ({ value, limit }: Finding) =>
+  value === null || limit === null || limit === 0 ? 0 : value / limit
+
+/** The finding to show for a part: of the case on screen before others, fails before warns, worst first. */
+function isWorse(a: Finding, b: Finding, loadCaseId: string | null): boolean {
+  if (RANK[a.severity] !== RANK[b.severity]) return RANK[a.severity] > RANK[b.severity]
+  const isElsewhere = (finding: Finding) =>
+    loadCaseId !== null && finding.loadCase !== null && finding.loadCase !== loadCaseId
+  if (isElsewhere(a) !== isElsewhere(b)) return isElsewhere(b)
+  // Only safeties count downwards; other values are not compared.
+  return WITH_VALUE.has(a.code) && WITH_VALUE.has(b.code) && margin(a) < margin(b)
+}
+
 function wordsOf(finding: Finding): string {
   const words = SHORT_WORDS[finding.code] ?? finding.code.replaceAll('-', ' ')
   return WITH_VALUE.has(finding.code) && finding.value !== null
-    ? `${words} ${finding.value.toFixed(2)}`
+    ? `${words} ${formatSafety(finding.value, finding.limit)}`
     : words
 }
 
-export function partStates(results: LayoutResults): Map<string, PartState> {
+/** @param loadCaseId the case on screen; null while the worst of all is */
+export function partStates(results: LayoutResults, loadCaseId: string | null): Map<string, PartState> {
   const worst = new Map<string, Finding>()
   const misplaced = new Set<string>()
   for (const finding of results.findings) {
     if (finding.severity === 'notes' || finding.part === '') continue
     if (finding.severity === 'fails' && MISPLACED.has(finding.code)) misplaced.add(finding.part)
     const known = worst.get(finding.part)
-    if (!known || RANK[finding.severity] > RANK[known.severity]) worst.set(finding.part, finding)
+    if (!known || isWorse(finding, known, loadCaseId)) worst.set(finding.part, finding)
   }
   const states = new Map<string, PartState>()
   for (const [part, finding] of worst) {
@@ -100,7 +117,10 @@ const NO_STATES: ReadonlyMap<string, PartState> = new Map()
 
 export function usePartStates(): ReadonlyMap<string, PartState> {
   const results = useResultsStore((state) => state.results)
-  return useMemo(() => (results ? partStates(results) : NO_STATES), [results])
+  const loadCaseId = useResultsStore((state) =>
+    isWorst(state.selectedLoadCaseId) ? null : state.selectedLoadCaseId,
+  )
+  return useMemo(() => (results ? partStates(results, loadCaseId) : NO_STATES), [results, loadCaseId])
 }
 
 export const stateOf = (states: ReadonlyMap<string, PartState>, id: string): PartState =>

@@ -10,8 +10,8 @@ import {
 } from '@/lib/view-transform'
 
 /** Room for the ruler and the names above the drawing, and for loads and dimensions below it. */
-export const DRAWING_MARGINS: ViewMargins = { left: 116, right: 28, top: 92, bottom: 64 }
-const NARROW_MARGINS: ViewMargins = { left: 16, right: 16, top: 84, bottom: 52 }
+export const DRAWING_MARGINS: ViewMargins = { left: 116, right: 28, top: 76, bottom: 88 }
+const NARROW_MARGINS: ViewMargins = { left: 16, right: 16, top: 80, bottom: 72 }
 
 const marginsFor = (widthPx: number) => (widthPx < 560 ? NARROW_MARGINS : DRAWING_MARGINS)
 

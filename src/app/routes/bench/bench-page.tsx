@@ -59,7 +59,7 @@ export function BenchPage({ layoutId }: { layoutId: string }) {
                 )}
               </div>
               {open.endView && (
-                <div className="w-60 shrink-0 border-l border-hairline">
+                <div className="w-62 shrink-0 border-l border-hairline">
                   <EndView document={document} />
                 </div>
               )}

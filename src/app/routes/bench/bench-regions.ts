@@ -30,7 +30,7 @@ function firstRegions(): Regions {
   const isTall = window.innerHeight >= 850
   return {
     open: { outline: false, endView: isWide, diagrams: true, inspector: true, tables: true },
-    sizePx: { diagrams: isTall ? 196 : 150, inspector: isWide ? 356 : 292, tables: isTall ? 236 : 184 },
+    sizePx: { diagrams: isTall ? 172 : 144, inspector: isWide ? 356 : 288, tables: isTall ? 216 : 172 },
   }
 }
 

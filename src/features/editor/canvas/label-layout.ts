@@ -1,7 +1,7 @@
 /**
  * Puts the names of the hubs above them so that none covers another, a neighbour's outline or the
- * ruler. A name first tries its own place, then rises row by row; where no row is free it loses its
- * second lines, then it is left out (the outline and the tooltip still have it).
+ * ruler. A name first tries its own place, then makes way to the side, then rises; where nothing is
+ * free it loses its last lines, then it is left out (the outline still has it).
  */
 export interface LabelWish {
   id: string
@@ -27,7 +27,13 @@ export interface PlacedLabel {
   isRaised: boolean
 }
 
-interface Box {
+export interface LabelFrame {
+  topPx: number
+  leftPx: number
+  rightPx: number
+}
+
+export interface LabelBox {
   left: number
   right: number
   top: number
@@ -37,38 +43,46 @@ interface Box {
 export const LABEL_LINE_PX = 14
 const GAP_PX = 5
 const SIDE_GAP_PX = 5
+/** A shifted name still reaches over its hub by this much. */
+const KEPT_OVER_HUB_PX = 12
+const SHIFT_STEP_PX = 8
+const RISE_STEP_PX = 4
 
-const touches = (a: Box, b: Box) =>
+const touches = (a: LabelBox, b: LabelBox) =>
   a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom
 
+/** @param bodies outlines that no name may cover, such as bearings; the hubs themselves are added */
 export function placeLabels(
   wishes: readonly LabelWish[],
-  frame: { topPx: number; leftPx: number; rightPx: number },
+  frame: LabelFrame,
+  bodies: readonly LabelBox[] = [],
 ): PlacedLabel[] {
-  const bodies = wishes.map((wish) => ({
+  const hubs = wishes.map((wish) => ({
     id: wish.id,
     left: wish.leftPx,
     right: wish.rightPx,
     top: wish.topPx,
     bottom: Infinity,
   }))
-  const taken: Box[] = []
+  const taken: LabelBox[] = []
   const ordered = [...wishes].sort(
     (a, b) => Number(b.isImportant) - Number(a.isImportant) || b.topPx - a.topPx || a.centrePx - b.centrePx,
   )
   const placed: PlacedLabel[] = []
   for (const wish of ordered) {
-    const obstacles = [...taken, ...bodies.filter((body) => body.id !== wish.id)]
+    const obstacles = [...taken, ...bodies, ...hubs.filter((hub) => hub.id !== wish.id)]
     const label = placeOne(wish, obstacles, frame)
     if (!label) continue
     placed.push(label)
-    taken.push(boxOf(wish, label.centrePx, label.bottomPx, label.lines))
+    taken.push(boxOf(halfWidth(wish, label.lines), label.centrePx, label.bottomPx, label.lines))
   }
   return placed
 }
 
-function boxOf(wish: LabelWish, centrePx: number, bottomPx: number, lines: number): Box {
-  const half = Math.max(0, ...wish.lineWidthsPx.slice(0, lines)) / 2 + SIDE_GAP_PX
+const halfWidth = (wish: LabelWish, lines: number) =>
+  Math.max(0, ...wish.lineWidthsPx.slice(0, lines)) / 2 + SIDE_GAP_PX
+
+function boxOf(half: number, centrePx: number, bottomPx: number, lines: number): LabelBox {
   return {
     left: centrePx - half,
     right: centrePx + half,
@@ -77,25 +91,31 @@ function boxOf(wish: LabelWish, centrePx: number, bottomPx: number, lines: numbe
   }
 }
 
-function placeOne(
-  wish: LabelWish,
-  obstacles: readonly Box[],
-  frame: { topPx: number; leftPx: number; rightPx: number },
-): PlacedLabel | null {
+/** Middles to try: over the hub first, then ever further to either side while still over a part of it. */
+function centresToTry(wish: LabelWish, half: number, frame: LabelFrame): number[] {
+  const reach = half + (wish.rightPx - wish.leftPx) / 2 - KEPT_OVER_HUB_PX
+  const inFrame = (centre: number) =>
+    frame.rightPx - frame.leftPx < 2 * half
+      ? wish.centrePx
+      : Math.min(Math.max(centre, frame.leftPx + half), frame.rightPx - half)
+  const centres = [inFrame(wish.centrePx)]
+  for (let shift = SHIFT_STEP_PX; shift <= reach; shift += SHIFT_STEP_PX) {
+    centres.push(inFrame(wish.centrePx + shift), inFrame(wish.centrePx - shift))
+  }
+  return centres
+}
+
+function placeOne(wish: LabelWish, obstacles: readonly LabelBox[], frame: LabelFrame): PlacedLabel | null {
   if (wish.rightPx < frame.leftPx || wish.leftPx > frame.rightPx) return null
+  const lowest = wish.topPx - GAP_PX
   for (let lines = wish.lineWidthsPx.length; lines >= 1; lines -= 1) {
-    const half = Math.max(0, ...wish.lineWidthsPx.slice(0, lines)) / 2 + SIDE_GAP_PX
-    const room = frame.rightPx - frame.leftPx
-    const centrePx =
-      room < 2 * half
-        ? wish.centrePx
-        : Math.min(Math.max(wish.centrePx, frame.leftPx + half), frame.rightPx - half)
-    const lowest = wish.topPx - GAP_PX
-    // The name may stand beside a taller neighbour's middle only when it clears its outline.
-    for (let bottomPx = lowest; bottomPx - lines * LABEL_LINE_PX >= frame.topPx; bottomPx -= 4) {
-      const box = boxOf(wish, centrePx, bottomPx, lines)
-      if (!obstacles.some((obstacle) => touches(box, obstacle))) {
-        return { id: wish.id, centrePx, bottomPx, lines, isRaised: lowest - bottomPx > 6 }
+    const half = halfWidth(wish, lines)
+    const centres = centresToTry(wish, half, frame)
+    for (let bottomPx = lowest; bottomPx - lines * LABEL_LINE_PX >= frame.topPx; bottomPx -= RISE_STEP_PX) {
+      for (const centrePx of centres) {
+        const box = boxOf(half, centrePx, bottomPx, lines)
+        if (obstacles.some((obstacle) => touches(box, obstacle))) continue
+        return { id: wish.id, centrePx, bottomPx, lines, isRaised: lowest - bottomPx > GAP_PX + 1 }
       }
     }
   }

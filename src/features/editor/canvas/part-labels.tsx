@@ -80,7 +80,17 @@ export const PartLabels = memo(function PartLabels({
         ...wish,
         isImportant: selectedIds.includes(wish.id) || words[index]?.state.verdict === 'fails',
       }))
-      const placed = placeLabels(wishes, { topPx: RULER_HEIGHT_PX + 4, leftPx: 4, rightPx: widthPx - 4 })
+      const bodies = document.bearings.map((bearing) => {
+        const extent = bearingExtent(document, bearing)
+        return {
+          left: stationToPx(view, extent.leftMm),
+          right: stationToPx(view, extent.rightMm),
+          top: heightToPx(view, extent.outerRadiusMm),
+          bottom: Infinity,
+        }
+      })
+      const frame = { topPx: RULER_HEIGHT_PX + 3, leftPx: 4, rightPx: widthPx - 4 }
+      const placed = placeLabels(wishes, frame, bodies)
       pen.textAlign = 'center'
       pen.textBaseline = 'alphabetic'
       for (const label of placed) {

@@ -101,7 +101,7 @@ export const DiagramRow = memo(function DiagramRow({
         {isPeakInSight && (
           <text
             x={peakX + (wordsLeft ? -7 : 7)}
-            y={Math.max(11, Math.min(toY(peak.value) + 4, heightPx - 3))}
+            y={peak.value >= 0 ? toY(peak.value) + 14 : toY(peak.value) - 6}
             textAnchor={wordsLeft ? 'end' : 'start'}
             className="fill-ink stroke-paper text-[11px] font-bold [paint-order:stroke]"
             strokeWidth={3}

@@ -7,7 +7,7 @@ import { useDerivationStore } from '@/stores/derivation-store'
 import { pxToStation } from '@/lib/view-transform'
 import { usePreferencesStore } from '@/stores/preferences-store'
 import { useResultsStore } from '@/stores/results-store'
-import { isWorst, shownShaftCase } from '@/stores/shown-load-case'
+import { shownShaftCase } from '@/stores/shown-load-case'
 import { useViewStore } from '../view-store'
 import { DiagramRow } from './diagram-row'
 import { diagramSeries } from './diagram-series'
@@ -103,9 +103,7 @@ export function Diagrams() {
       )}
       {shown && (
         <div className="absolute top-0.5 right-3 flex items-center gap-2 text-[11px] font-semibold text-quiet">
-          <span className="rounded bg-paper/85 px-1.5 max-md:hidden">
-            {isOld ? 'updating…' : `${isWorst(selected) ? 'worst for the shaft: ' : ''}${caseName}`}
-          </span>
+          {isOld && <span className="rounded bg-paper/85 px-1.5">updating…</span>}
           <label className="flex items-center gap-1 rounded bg-paper/85 px-1.5">
             <input
               type="checkbox"

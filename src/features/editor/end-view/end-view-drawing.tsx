@@ -27,8 +27,14 @@ const CLEARANCE_DEG = 24
 export function EndViewDrawing({ document, phases, forces, from }: EndViewDrawingProps) {
   const selectedIds = useSelectionStore((state) => state.selectedIds)
   const hoveredId = useSelectionStore((state) => state.hoveredId)
+  const lobes = phases.filter((mark) => mark.isCam)
   const hubs = document.hubs.map((hub) => ({ hub, radius: hubExtent(document, hub).outerRadiusMm }))
-  const shaftRadius = Math.max(1, ...document.shaft.sections.map((section) => section.outerDiameterMm / 2))
+  const sectionRadii = document.shaft.sections.map((section) => section.outerDiameterMm / 2)
+  // A collar would cover the lobes; with cams on the shaft, their seats are what matters.
+  const shaftRadius = Math.max(
+    1,
+    ...(lobes.length > 0 ? lobes.map((mark) => mark.boreRadiusMm) : sectionRadii),
+  )
   const bore = Math.min(
     ...document.shaft.sections.map((section) => section.boreDiameterMm / 2),
     Number.MAX_VALUE,
@@ -38,11 +44,7 @@ export function EndViewDrawing({ document, phases, forces, from }: EndViewDrawin
   const isMarked = (id: string) => selectedIds.includes(id) || hoveredId === id
   // Big ones first, so that small ones are not covered; cams have their lobes instead of a circle.
   const circles = hubs.filter(({ hub }) => hub.role !== 'cam').sort((a, b) => b.radius - a.radius)
-  const lobes = phases.filter((mark) => mark.isCam)
-  const rows = labelRows(
-    [...phases.map((mark) => mark.phaseDeg), ...forces.map((mark) => mark.angleDeg)],
-    CLEARANCE_DEG,
-  )
+  const words = angleWords(phases, forces)
 
   return (
     <svg
@@ -60,11 +62,10 @@ export function EndViewDrawing({ document, phases, forces, from }: EndViewDrawin
           strokeWidth={isMarked(hub.id) ? 1.8 : 1}
         />
       ))}
-      <circle r={shaftRadius * scale} className="fill-card stroke-ink" strokeWidth={1.2} />
       {lobes.map((mark) => (
         <path
           key={mark.hubId}
-          d={lobePath(mark.outerRadiusMm * scale, mark.phaseDeg, from)}
+          d={lobePath(mark.boreRadiusMm * scale, mark.outerRadiusMm * scale, mark.phaseDeg, from)}
           className={
             mark.isOff
               ? 'fill-bad/10 stroke-bad'
@@ -76,6 +77,7 @@ export function EndViewDrawing({ document, phases, forces, from }: EndViewDrawin
           strokeDasharray={mark.isOff ? '4 2.5' : undefined}
         />
       ))}
+      <circle r={shaftRadius * scale} className="fill-card stroke-ink" strokeWidth={1.2} />
       {bore > 0 && bore < shaftRadius && (
         <circle r={bore * scale} className="fill-paper stroke-ink" strokeWidth={1} />
       )}
@@ -90,7 +92,7 @@ export function EndViewDrawing({ document, phases, forces, from }: EndViewDrawin
           key={mark.hubId}
           mark={mark}
           from={from}
-          row={rows[index] ?? 0}
+          row={words[index] ?? null}
           isMarked={isMarked(mark.hubId)}
         />
       ))}
@@ -100,12 +102,30 @@ export function EndViewDrawing({ document, phases, forces, from }: EndViewDrawin
           mark={mark}
           from={from}
           startRadius={mark.outerRadiusMm * scale}
-          row={rows[phases.length + index] ?? 0}
+          row={words[phases.length + index] ?? null}
           isMarked={isMarked(mark.hubId)}
         />
       ))}
     </svg>
   )
+}
+
+/**
+ * Which angles are written, and how far out: equal angles once, neighbours in rows.
+ * @returns for each phase and then each force its row, or null when it is not written
+ */
+function angleWords(phases: readonly PhaseMark[], forces: readonly ForceMark[]): (number | null)[] {
+  const angles = [
+    ...phases.map((mark) => round(mark.phaseDeg)),
+    ...forces.map((mark) => Math.round(mark.angleDeg)),
+  ]
+  const isFirst = (index: number) => angles.indexOf(angles[index] ?? 0) === index
+  const rows = labelRows(
+    angles.filter((_, index) => isFirst(index)),
+    CLEARANCE_DEG,
+  )
+  let next = 0
+  return angles.map((_, index) => (isFirst(index) ? (rows[next++] ?? 0) : null))
 }
 
 /** A mark every ten degrees, longer every ninety. */
@@ -130,11 +150,12 @@ function PhaseLine({
 }: {
   mark: PhaseMark
   from: ViewedFrom
-  row: number
+  /** Row of the words, outward; null when the same angle is written already. */
+  row: number | null
   isMarked: boolean
 }) {
   const at = direction(mark.phaseDeg, from)
-  const words = RADIUS + 18 + row * 11
+  const words = RADIUS + 18 + (row ?? 0) * 11
   const tone = mark.isOff ? 'stroke-bad' : isMarked ? 'stroke-steel' : 'stroke-bronze'
   const ink = mark.isOff ? 'fill-bad' : isMarked ? 'fill-steel' : 'fill-bronze'
   const required = mark.isOff && mark.requiredDeg !== null ? direction(mark.requiredDeg, from) : null
@@ -152,7 +173,9 @@ function PhaseLine({
           strokeDasharray="3 2"
         />
       )}
-      <Words x={at.x * words} y={at.y * words} className={ink}>{`${round(mark.phaseDeg)}°`}</Words>
+      {row !== null && (
+        <Words x={at.x * words} y={at.y * words} className={ink}>{`${round(mark.phaseDeg)}°`}</Words>
+      )}
     </g>
   )
 }
@@ -169,14 +192,15 @@ function ForceArrow({
   mark: ForceMark
   from: ViewedFrom
   startRadius: number
-  row: number
+  /** Row of the words, outward; null when the same angle is written already. */
+  row: number | null
   isMarked: boolean
 }) {
   const at = direction(mark.angleDeg, from)
   const tip = RADIUS + 10
   const side = { x: -at.y, y: at.x }
   const back = tip - 7
-  const words = RADIUS + 19 + row * 11
+  const words = RADIUS + 19 + (row ?? 0) * 11
   const tone = isMarked ? 'stroke-steel' : 'stroke-plum'
   const fill = isMarked ? 'fill-steel' : 'fill-plum'
   return (
@@ -193,7 +217,9 @@ function ForceArrow({
         d={`M${at.x * tip} ${at.y * tip}L${at.x * back + side.x * 3.4} ${at.y * back + side.y * 3.4}L${at.x * back - side.x * 3.4} ${at.y * back - side.y * 3.4}Z`}
         className={fill}
       />
-      <Words x={at.x * words} y={at.y * words} className={fill}>{`${Math.round(mark.angleDeg)}°`}</Words>
+      {row !== null && (
+        <Words x={at.x * words} y={at.y * words} className={fill}>{`${Math.round(mark.angleDeg)}°`}</Words>
+      )}
     </g>
   )
 }

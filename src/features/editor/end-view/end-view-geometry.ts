@@ -28,6 +28,7 @@ export interface PhaseMark {
   /** Angle of the timing chart, when it has one. */
   requiredDeg: number | null
   toleranceDeg: number
+  boreRadiusMm: number
   outerRadiusMm: number
   isOff: boolean
 }
@@ -53,6 +54,7 @@ export function phaseMarks(document: LayoutDocument): PhaseMark[] {
     if (phaseDeg === null) return []
     // An angle of zero on a gear nobody times is the file's way of saying that it does not matter.
     if (hub.role !== 'cam' && phaseDeg === 0 && !timing) return []
+    const extent = hubExtent(document, hub)
     const off = timing ? Math.abs(angleBetween(timing.phaseDeg, phaseDeg)) : 0
     return [
       {
@@ -62,7 +64,8 @@ export function phaseMarks(document: LayoutDocument): PhaseMark[] {
         phaseDeg,
         requiredDeg: timing?.phaseDeg ?? null,
         toleranceDeg: timing?.toleranceDeg ?? 0,
-        outerRadiusMm: hubExtent(document, hub).outerRadiusMm,
+        boreRadiusMm: extent.innerRadiusMm,
+        outerRadiusMm: extent.outerRadiusMm,
         isOff: timing !== undefined && off > timing.toleranceDeg + ANGLE_DUST_DEG,
       },
     ]
@@ -88,13 +91,18 @@ export function forceMarks(document: LayoutDocument, loadCaseId: string | null):
 }
 
 /**
- * A cam: base circle and nose, joined by tangents. The document knows the outside only, so the base
- * circle is drawn at seven tenths of it: the shape shows the angle, not the lift.
- * @returns an SVG path about the origin, in the unit of the radius
+ * A cam: base circle and nose, joined by tangents. The document knows bore and outside only, so the
+ * base circle is drawn between them: the shape shows the angle, not the lift.
+ * @returns an SVG path about the origin, in the unit of the radii
  */
-export function lobePath(outerRadius: number, angleDeg: number, from: ViewedFrom): string {
-  const base = outerRadius * 0.7
-  const nose = outerRadius * 0.24
+export function lobePath(
+  boreRadius: number,
+  outerRadius: number,
+  angleDeg: number,
+  from: ViewedFrom,
+): string {
+  const base = Math.max(outerRadius * 0.6, boreRadius + (outerRadius - boreRadius) * 0.2)
+  const nose = Math.min(outerRadius * 0.22, base * 0.9)
   const centre = outerRadius - nose
   // Half the angle between the two tangent points, seen from the cam's axis.
   const tangent = (Math.acos((base - nose) / centre) * 180) / Math.PI

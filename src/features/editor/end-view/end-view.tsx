@@ -34,17 +34,17 @@ export function EndView({ document }: { document: LayoutDocument }) {
   return (
     <section aria-label="End view" className="flex h-full min-h-0 flex-col overflow-y-auto px-2 pt-2 pb-3">
       <div className="flex items-baseline justify-between gap-2">
-        <h2 className="text-[13px] font-bold">End view, from the {from}</h2>
+        <h2 className="text-[13px] font-bold whitespace-nowrap">From the {from} end</h2>
         <button
           type="button"
-          className="rounded text-xs font-semibold text-steel underline"
+          className="rounded text-xs font-semibold whitespace-nowrap text-steel underline"
           onClick={() => setFrom(OTHER_END[from])}
         >
-          from the {OTHER_END[from]}
+          see from {OTHER_END[from]}
         </button>
       </div>
       <p className="text-[11px] text-quiet">
-        Angles from the top, {from === 'left' ? 'clockwise' : 'anticlockwise'} from this end
+        Angles from the top, {from === 'left' ? 'clockwise' : 'anticlockwise'}
       </p>
       <EndViewDrawing document={document} phases={phases} forces={forces} from={from} />
       {phases.length > 0 && (

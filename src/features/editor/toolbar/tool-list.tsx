@@ -57,7 +57,7 @@ export function ToolList() {
               tabIndex={isChosen ? 0 : -1}
               title={`${help} (${key.toUpperCase()})`}
               className={`flex items-center gap-2 rounded px-2 py-1.5 text-[13px] font-semibold ${
-                isChosen ? 'bg-bar text-bar-ink' : 'text-ink hover:bg-steel-soft'
+                isChosen ? 'bg-ink text-paper' : 'text-ink hover:bg-steel-soft'
               }`}
               onClick={() => run(actionById(`tool-${id}`))}
             >

@@ -1,4 +1,4 @@
-/** Undo, redo, zoom and help in the corner of the drawing. */
+/** Undo, redo, zoom and help under the drawing. */
 import type { ReactNode } from 'react'
 import { IconButton } from '@/components/icon-button'
 import { useLayoutStore } from '@/stores/layout-store'
@@ -43,11 +43,7 @@ const TEXT_BUTTON =
 export function ViewControls({ children }: { children?: ReactNode }) {
   const { run } = useBenchActions()
   return (
-    <div
-      role="group"
-      aria-label="View"
-      className="absolute right-3 bottom-14 z-10 flex items-center rounded-lg border border-hairline bg-card/95"
-    >
+    <div role="group" aria-label="View" className="ml-auto flex shrink-0 items-center">
       <HistoryControls />
       <button
         type="button"
