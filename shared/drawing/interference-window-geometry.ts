@@ -118,34 +118,39 @@ const MARGIN_SHARE = 0.12
 /**
  * A scale wide enough for every window given. One window: its own scale (inspector, sheet of one
  * hub). All hubs of a layout: the common scale of the schedule. Starts at zero unless something
- * lies below it.
+ * lies below it. `unitUm` is the unit of the axis (25.4 for thousandths of an inch), so that its ticks
+ * fall on round numbers.
  */
-export function windowScale(windows: readonly WindowValues[]): WindowScale {
+export function windowScale(windows: readonly WindowValues[], unitUm = 1): WindowScale {
   let least = 0
   let most = 0
   for (const { minUm, maxUm, requiredUm, permissibleUm } of windows) {
     for (const value of [minUm, maxUm, requiredUm, permissibleUm]) {
       if (value === null || !Number.isFinite(value)) continue
-      least = Math.min(least, value)
-      most = Math.max(most, value)
+      least = Math.min(least, value / unitUm)
+      most = Math.max(most, value / unitUm)
     }
   }
-  if (most - least < 10) most = least + 10
+  if ((most - least) * unitUm < LEAST_SPAN_UM) most = least + LEAST_SPAN_UM / unitUm
   const step = tickStep(most - least)
   const margin = (most - least) * MARGIN_SHARE
-  const fromUm = least < 0 ? Math.floor((least - margin) / step) * step : 0
-  const toUm = Math.ceil((most + margin) / step) * step
-  const ticksUm: number[] = []
-  for (let tick = fromUm; tick <= toUm + step / 1_000; tick += step) ticksUm.push(Math.round(tick))
-  return { fromUm, toUm, ticksUm }
+  const first = least < 0 ? Math.floor((least - margin) / step) : 0
+  const last = Math.ceil((most + margin) / step)
+  const tick = (count: number) => Number((count * step * unitUm).toPrecision(10))
+  return {
+    fromUm: tick(first),
+    toUm: tick(last),
+    ticksUm: Array.from({ length: last - first + 1 }, (_, index) => tick(first + index)),
+  }
 }
 
-/** Four to eight ticks at 1, 2, 2.5 or 5 times a power of ten, whole micrometres. */
+const LEAST_SPAN_UM = 10
+
+/** Four to eight ticks at 1, 2, 2.5 or 5 times a power of ten. */
 function tickStep(span: number): number {
   const rough = span / 5
   const power = 10 ** Math.floor(Math.log10(rough))
-  const step = [1, 2, 2.5, 5, 10].map((factor) => factor * power).find((candidate) => candidate >= rough)
-  return Math.max(1, Math.round(step ?? power * 10))
+  return ([1, 2, 2.5, 5].find((factor) => factor * power >= rough) ?? 10) * power
 }
 
 /** Where everything lies over `width` units of drawing. Positions are clamped to the drawing. */

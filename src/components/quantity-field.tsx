@@ -1,5 +1,5 @@
 import { type KeyboardEvent, type ReactNode, useId, useRef, useState } from 'react'
-import { formatEntered, formatGiven } from '@/lib/format-quantity'
+import { formatAtRest, formatEntered, formatGiven } from '@/lib/format-quantity'
 import { parseQuantity } from '@/lib/quantity-entry'
 import { displayUnit, fromStored, type QuantityKind, toStored, type UnitSystem } from '@/lib/quantity-units'
 import { usePreferencesStore } from '@/stores/preferences-store'
@@ -73,6 +73,7 @@ export function QuantityField(props: QuantityFieldProps) {
   const id = useId()
   const [draft, setDraft] = useState<string | null>(() => keptDraft(props.draftKey)?.text ?? null)
   const [message, setMessage] = useState<string | null>(() => keptDraft(props.draftKey)?.message ?? null)
+  const [isFocused, setIsFocused] = useState(false)
   /** The value when typing began: previews change `value` under the typed text. */
   const startValue = useRef<number | null>(null)
 
@@ -211,7 +212,7 @@ export function QuantityField(props: QuantityFieldProps) {
           autoComplete="off"
           spellCheck={false}
           readOnly={isReadOnly}
-          value={draft ?? formatEntered(value, kind, system)}
+          value={draft ?? (isFocused ? formatEntered : formatAtRest)(value, kind, system)}
           placeholder={props.placeholder}
           aria-invalid={message !== null || undefined}
           aria-describedby={describedBy === '' ? undefined : describedBy}
@@ -223,11 +224,12 @@ export function QuantityField(props: QuantityFieldProps) {
           onChange={(event) => change(event.target.value)}
           onKeyDown={onKeyDown}
           onFocus={() => {
-            beginDraft()
+            setIsFocused(true)
             props.onFocusChange?.(true)
           }}
           onBlur={() => {
             commit()
+            setIsFocused(false)
             props.onFocusChange?.(false)
           }}
         />

@@ -33,7 +33,7 @@ const WIDTH = 100
 const percent = (value: number) => `${value.toFixed(3)}%`
 
 export function InterferenceWindow({ values, size, units, scale }: InterferenceWindowProps) {
-  const usedScale = scale ?? windowScale([values])
+  const usedScale = scale ?? windowScale([values], displayUnit('interference', units).factor)
   const geometry = windowGeometry(values, usedScale, WIDTH)
   const label = windowSentence(values)
   return size === 'row' ? (
@@ -99,8 +99,10 @@ function FullWindow({ values, geometry, scale, label, units }: FullWindowProps) 
   const top = 14 + barRows * ROW_PX
   const height = 22
   const unit = displayUnit('interference', units)
-  const tickText = (um: number) =>
-    formatNumber(Number(fromStored(um, unit).toPrecision(3)), units === 'inch' ? 1 : 0)
+  const tickText = (um: number) => {
+    const value = Number(fromStored(um, unit).toPrecision(6))
+    return formatNumber(value, Math.min(2, (String(value).split('.')[1] ?? '').length))
+  }
   const ticksY = top + height + 6
 
   return (

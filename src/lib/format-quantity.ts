@@ -49,6 +49,9 @@ const THOUSANDS: Record<string, { above: number; factor: number; unit: string }>
   lbf: { above: 9_999.5, factor: 1_000, unit: 'kip' },
 }
 
+/** 68 293 rpm would claim more than a calculation knows. */
+const fourDigits = (value: number) => (Math.abs(value) >= 10_000 ? Number(value.toPrecision(4)) : value)
+
 /** A calculated value. */
 export function formatResult(
   stored: number | null,
@@ -57,7 +60,7 @@ export function formatResult(
 ): FormattedQuantity {
   const unit = displayUnit(kind, system)
   if (stored === null || !Number.isFinite(stored)) return assemble(NOT_COMPUTED, unit.symbol)
-  const value = fromStored(stored, unit)
+  const value = fourDigits(fromStored(stored, unit))
   const thousands = THOUSANDS[unit.symbol]
   if (thousands !== undefined && Math.abs(value) >= thousands.above) {
     const scaled = value / thousands.factor
@@ -116,6 +119,17 @@ export function formatEntered(
   if (stored === null || stored === undefined || !Number.isFinite(stored)) return ''
   const value = fromStored(stored, displayUnit(kind, system))
   return String(Number(system === 'inch' ? value.toPrecision(7) : value.toPrecision(10)))
+}
+
+/** A field nobody is typing in: no more decimals than anybody measures. Focus shows the value in full. */
+export function formatAtRest(
+  stored: number | null | undefined,
+  kind: QuantityKind,
+  system: UnitSystem,
+): string {
+  if (stored === null || stored === undefined || !Number.isFinite(stored)) return ''
+  const value = fromStored(stored, displayUnit(kind, system))
+  return String(Math.abs(value) >= 0.01 ? Number(value.toFixed(4)) : Number(value.toPrecision(4)))
 }
 
 /** An entered value for reading, with its unit. */

@@ -4,6 +4,7 @@ import type { Sorting } from '@/components/data-table'
 import { EmptyState } from '@/components/empty-state'
 import { Cautions } from '@/drawings/cautions'
 import { formatGiven } from '@/lib/format-quantity'
+import { displayUnit } from '@/lib/quantity-units'
 import { useLayoutStore } from '@/stores/layout-store'
 import { usePreferencesStore } from '@/stores/preferences-store'
 import { useResultsStore } from '@/stores/results-store'
@@ -37,7 +38,10 @@ export function FitSchedule() {
     heldOrder === null
       ? sorted
       : [...sorted].sort((one, other) => place(one.hub.id) - place(other.hub.id) || 0)
-  const scale = windowScale(rows.flatMap(({ result }) => (result === null ? [] : [windowValuesOf(result)])))
+  const scale = windowScale(
+    rows.flatMap(({ result }) => (result === null ? [] : [windowValuesOf(result)])),
+    displayUnit('interference', units).factor,
+  )
   const scaleText = `${formatGiven(scale.fromUm, 'interference', units).number} to ${formatGiven(scale.toUm, 'interference', units).text}`
 
   return (

@@ -45,11 +45,11 @@ function FormulaPart({ node }: { node: FormulaNode }) {
       )
     case 'fraction':
       return (
-        <span className="mx-0.5 inline-flex flex-col items-center align-middle leading-tight">
-          <span className="inline-flex items-center px-1 pb-0.5">
+        <span className="mx-0.5 inline-flex flex-col items-stretch align-middle leading-tight">
+          <span className="inline-flex items-center justify-center px-1 pb-0.5">
             <FormulaPart node={node.above} />
           </span>
-          <span className="inline-flex items-center border-t border-ink px-1 pt-0.5">
+          <span className="inline-flex items-center justify-center border-t border-ink px-1 pt-0.5">
             <FormulaPart node={node.below} />
           </span>
         </span>
@@ -66,10 +66,18 @@ function FormulaPart({ node }: { node: FormulaNode }) {
     case 'group':
       return (
         <>
-          <span>(</span>
+          <Bracket isTall={isTall(node.content)}>(</Bracket>
           <FormulaPart node={node.content} />
-          <span>)</span>
+          <Bracket isTall={isTall(node.content)}>)</Bracket>
         </>
       )
   }
+}
+
+/** Brackets around a fraction grow with it. */
+const isTall = (node: FormulaNode): boolean =>
+  node.kind === 'fraction' || (node.kind === 'row' && node.items.some(isTall))
+
+function Bracket({ isTall: grows, children }: { isTall: boolean; children: string }) {
+  return <span className={grows ? 'scale-x-75 text-[2em] leading-none font-light' : ''}>{children}</span>
 }

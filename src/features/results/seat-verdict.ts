@@ -7,6 +7,8 @@ export interface SeatCount {
   total: number
   /** The worst of those that do not hold, in words; else what else there is to say. */
   caption: string
+  /** All seats hold, yet something else fails. */
+  isOtherwiseFailing: boolean
 }
 
 const slips = ({ slipSafety, slipSafetyLimit }: HubLoadCaseResult) =>
@@ -39,6 +41,7 @@ export function countHoldingSeats(
   return {
     holding,
     total: seats.length,
+    isOtherwiseFailing: worst === null && unknown === undefined && failing > 0,
     caption:
       worst !== null
         ? `${nameOf(worst.hub.id)} slips in case “${caseName(worst.item.loadCase)}”`

@@ -25,7 +25,7 @@ export function VerdictStrip() {
     <section
       aria-label="Verdict"
       aria-busy={isUpdating}
-      className="flex flex-wrap items-start gap-x-7 gap-y-2 px-5 py-3"
+      className="flex flex-col gap-x-6 gap-y-2 px-5 py-3 sm:flex-row sm:items-start"
     >
       {results === null || document === null ? (
         <Figure value="–" caption={failure ?? 'calculating'} tone={failure === null ? 'plain' : 'bad'} />
@@ -38,7 +38,7 @@ export function VerdictStrip() {
           isUpdating={isUpdating}
         />
       )}
-      <div className="ml-auto min-w-40 text-right">
+      <div className="shrink-0 sm:ml-auto sm:max-w-56 sm:text-right">
         <LoadCaseChoice />
         <p role="status" className="text-xs text-quiet">
           {failure !== null && results !== null ? (
@@ -92,6 +92,7 @@ function Figures({ results, document, selected, units, isUpdating }: FiguresProp
             : `${seats.holding} of ${seats.total} ${seats.total === 1 ? 'seat holds' : 'seats hold'}`
         }
         caption={seats.caption}
+        isCaptionBad={seats.isOtherwiseFailing}
         tone={seats.total === 0 ? 'plain' : seats.holding === seats.total ? 'good' : 'bad'}
       />
       {fatigue?.fatigueSafety ? (
@@ -189,11 +190,13 @@ function Figure({
   caption,
   title,
   tone,
+  isCaptionBad = false,
 }: {
   value: ReactNode
   caption: string
   title?: string
   tone: Tone
+  isCaptionBad?: boolean
 }) {
   return (
     <div title={title === '' ? undefined : title}>
@@ -202,7 +205,10 @@ function Figure({
         {tone === 'bad' && <span className="sr-only">Fails: </span>}
         {value}
       </p>
-      <p className="text-xs text-quiet">{caption}</p>
+      <p className={`text-xs ${isCaptionBad ? 'font-semibold text-bad' : 'text-quiet'}`}>
+        {isCaptionBad && <span aria-hidden="true">✕ </span>}
+        {caption}
+      </p>
     </div>
   )
 }

@@ -3,8 +3,8 @@ import { LayoutChoiceField } from '@/fields/layout-choice-field'
 import { useLayoutField } from '@/fields/layout-field'
 import { LayoutQuantityField } from '@/fields/layout-quantity-field'
 import { hubAddress } from '@/fields/part-address'
-import { formatNumber, formatResultPair } from '@/lib/format-quantity'
-import type { UnitSystem } from '@/lib/quantity-units'
+import { formatResultPair } from '@/lib/format-quantity'
+import { displayUnit, fromStored, type UnitSystem } from '@/lib/quantity-units'
 import type { Hub, InterferenceFit } from '@shared/layout/layout-document'
 import {
   classLimits,
@@ -81,7 +81,7 @@ export function FitFields({ hub, seatDiameterMm, band, window, units }: FitField
       </FieldGrid>
       {hub.fit.kind === 'iso286' && (
         <>
-          <LimitsLine sizeMm={sizeMm} hole={hub.fit.hole} shaft={hub.fit.shaft} />
+          <LimitsLine sizeMm={sizeMm} hole={hub.fit.hole} shaft={hub.fit.shaft} units={units} />
           <TakeFit hub={hub} fit={hub.fit} sizeMm={sizeMm} window={window} units={units} />
         </>
       )}
@@ -183,12 +183,28 @@ function TakeFit({
 }
 
 /** Deviations of both classes, the way a drawing gives them. */
-function LimitsLine({ sizeMm, hole, shaft }: { sizeMm: number; hole: string; shaft: string }) {
+function LimitsLine({
+  sizeMm,
+  hole,
+  shaft,
+  units,
+}: {
+  sizeMm: number
+  hole: string
+  shaft: string
+  units: UnitSystem
+}) {
   if (sizeMm <= 0) return null
-  const signed = (um: number) => (um > 0 ? '+' : '') + formatNumber(um, Number.isInteger(um) ? 0 : 1)
+  const unit = displayUnit('interference', units)
+  const signed = (um: number) => {
+    const value = Number(fromStored(um, unit).toFixed(units === 'inch' ? 2 : 1))
+    return value === 0 ? '0' : `${value > 0 ? '+' : '−'}${Math.abs(value)}`
+  }
   const words = (name: string) => {
     const limits = classLimits(sizeMm, name)
-    return limits.isKnown ? `${name} ${signed(limits.upperUm)}/${signed(limits.lowerUm)} µm` : null
+    return limits.isKnown
+      ? `${name} ${signed(limits.upperUm)}/${signed(limits.lowerUm)} ${unit.symbol}`
+      : null
   }
   const problems = [hole, shaft].flatMap((name) => {
     const limits = classLimits(sizeMm, name)

@@ -39,7 +39,7 @@ interface ResultRowProps {
 export function ResultRow({ label, name, value, reference, safety }: ResultRowProps) {
   const spoken = name ?? (typeof label === 'string' ? label.toLowerCase() : 'this number')
   return (
-    <div className="flex items-baseline justify-between gap-3 border-b border-dashed border-hairline py-1 text-sm">
+    <div className="flex items-baseline justify-between gap-3 border-b border-dashed border-hairline py-1 text-[13px]">
       <span className="text-quiet">{label}</span>
       <span className="text-right font-semibold whitespace-nowrap tabular-nums">
         {value !== '' && <Openable reference={reference} label={`formula of ${spoken}`} text={value} />}
