@@ -66,6 +66,8 @@ export const test = base.extend<Journey, { sessions: Map<PersonKey, StorageState
       if (!sessions.has(person)) {
         await signIn(page, PEOPLE[person].email, DEMO_PASSWORD)
         sessions.set(person, await page.context().storageState())
+      } else {
+        await page.goto('/')
       }
       return page
     })

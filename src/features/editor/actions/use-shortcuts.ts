@@ -10,7 +10,8 @@ import { type ActionContext, matchesChord } from './action'
 import { ALL_ACTIONS } from './all-actions'
 import { type Nudger, nudgeStepMm } from './nudge'
 
-const FIELD = 'input, textarea, select, [contenteditable], dialog, [role=menu], [role=listbox], [role=grid]'
+// The outline is a list of parts, not a field: what it does not use itself are shortcuts.
+const FIELD = 'input, textarea, select, [contenteditable], dialog, [role=menu]'
 const OWN_ARROWS = '[role=tablist], [role=radiogroup], [role=separator], [role=slider], [data-own-arrows]'
 
 const isIn = (event: KeyboardEvent, selector: string) =>
