@@ -101,6 +101,8 @@ export function attachRealtime(httpServer: HttpServer, parts: RealtimeParts): Re
   }
 
   function onRevoked(revocation: Revocation): void {
+    // Before sockets leave its audience: the person concerned shall hear it too.
+    if (revocation.kind !== 'session') rooms.announceWorkspace(revocation.workspaceId, 'people')
     for (const socket of socketsOf(revocation.userId)) {
       if (revocation.kind !== 'session') recheck(socket)
       else if (socket.data.principal.sessionId === revocation.sessionId) cut(socket)

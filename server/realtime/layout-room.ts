@@ -215,8 +215,10 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
     try {
       results = this.parts.storage.transaction((transaction) => {
         let layout = this.layout
+        const resumed = new Set<string>()
         return jobs.map((job) => {
-          if (isStalled(job)) return { job, result: null }
+          if (isStalled(job, resumed)) return { job, result: null }
+          resumed.add(job.edit.editId)
           const result = acceptEdit(
             transaction,
             layout,
@@ -315,7 +317,8 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
   }
 }
 
-function isStalled(job: EditJob): boolean {
+/** `resumed` holds what this turn takes up again: after that the way is free. */
+function isStalled(job: EditJob, resumed: ReadonlySet<string>): boolean {
   const { stalledEditId } = job.session
-  return stalledEditId !== null && stalledEditId !== job.edit.editId
+  return stalledEditId !== null && stalledEditId !== job.edit.editId && !resumed.has(stalledEditId)
 }

@@ -2,6 +2,8 @@ import type { EditKey, EditStorage, EditTransaction, Receipt, StoredLayout } fro
 import type { LayoutDocument } from '@shared/layout/layout-document'
 import type { AcceptedEdit } from '@shared/protocol/realtime'
 
+export type WriteStep = 'append' | 'storeReceipt' | 'commit'
+
 interface Shelf {
   layout: StoredLayout
   base: { revision: number; document: LayoutDocument } | null
@@ -14,10 +16,10 @@ export interface MemoryEditTransaction extends EditTransaction {
   setStatus(layoutId: string, change: Partial<Pick<StoredLayout, 'status' | 'revisionLetter'>>): void
 }
 
-/** The storage contract without a database. `failNext` makes the next write throw, as a full disk would. */
+/** The storage contract without a database. `failures` makes the next such steps throw, as a full disk would. */
 export class MemoryEditStorage implements EditStorage<MemoryEditTransaction> {
   #shelves = new Map<string, Shelf>()
-  failNext: 'append' | 'storeReceipt' | 'commit' | null = null
+  readonly failures: WriteStep[] = []
   transactionCount = 0
 
   addLayout(layout: StoredLayout): void {
@@ -87,9 +89,9 @@ export class MemoryEditStorage implements EditStorage<MemoryEditTransaction> {
     },
   }
 
-  #failIf(step: NonNullable<MemoryEditStorage['failNext']>): void {
-    if (this.failNext !== step) return
-    this.failNext = null
+  #failIf(step: WriteStep): void {
+    if (this.failures[0] !== step) return
+    this.failures.shift()
     throw new Error(`${step} failed`)
   }
 

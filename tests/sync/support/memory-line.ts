@@ -131,7 +131,8 @@ export class BrowserLine {
 
   readonly openConnection: OpenConnection = (handlers) => {
     this.#handlers = handlers
-    if (this.isOnline) this.#connect()
+    // As a real line, it opens after whoever asked has it in hand.
+    queueMicrotask(() => this.reconnect())
     return {
       join: (request, reply) => this.#push((pipe) => this.lines.joinTo(pipe, request, reply)),
       submit: (request, reply) =>
