@@ -2,17 +2,21 @@ import { MutationCache, QueryCache, QueryClient } from '@tanstack/react-query'
 import { HttpError } from './http-client'
 import { queryKeys } from './query-keys'
 
-const isSignedOut = (error: unknown) => error instanceof HttpError && error.status === 401
+const ACCESS_STATUSES = [401, 403, 404]
+
+/** Signed out elsewhere, removed, or of another role now. */
+const mayBeLostAccess = (error: unknown) =>
+  error instanceof HttpError && ACCESS_STATUSES.includes(error.status)
 
 /** A refusal stays a refusal; only silence and server trouble are worth asking again. */
 const isWorthRetrying = (error: unknown) =>
   !(error instanceof HttpError) || error.status === 0 || error.status >= 502
 
 export function createQueryClient(): QueryClient {
-  // A 401 means the session ended elsewhere: asking who we are again leads to the sign-in page. What is
-  // on screen stays until that is answered.
+  // Asking who we are again leads to the sign-in page or away from the workspace. What is on screen stays
+  // until that is answered.
   const onError = (error: unknown) => {
-    if (isSignedOut(error)) void client.invalidateQueries({ queryKey: queryKeys.me })
+    if (mayBeLostAccess(error)) void client.invalidateQueries({ queryKey: queryKeys.me })
   }
   const client: QueryClient = new QueryClient({
     queryCache: new QueryCache({

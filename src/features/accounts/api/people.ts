@@ -4,11 +4,15 @@ import { queryKeys } from '@/lib/query-keys'
 import { invitationSchema, peopleSchema } from '@shared/protocol/accounts'
 import type { Role } from '@shared/protocol/roles'
 
+/** Behind the socket's news, and for open invitations, about which there is none. */
+const REFRESH_MS = 30_000
+
 export const peopleQuery = (workspaceId: string) =>
   queryOptions({
     queryKey: queryKeys.people(workspaceId),
     queryFn: ({ signal }) =>
       request(`/api/workspaces/${workspaceId}/members`, { schema: peopleSchema, signal }),
+    refetchInterval: REFRESH_MS,
   })
 
 /** Every change of people refreshes the page, whether it worked or not: what is shown is what is so. */

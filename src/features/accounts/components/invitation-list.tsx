@@ -18,6 +18,15 @@ export function InvitationList({
   canManage: boolean
 }) {
   const cancel = useCancelInvitation(workspaceId)
+  // Awaited here, because callbacks of the mutation die with the last invitation's list.
+  const withdraw = async (invitation: Invitation) => {
+    try {
+      await cancel.mutateAsync(invitation.id)
+      showToast(`Invitation of ${invitation.email} withdrawn`)
+    } catch (error) {
+      showToast(messageOf(error), 'bad')
+    }
+  }
   return (
     <DataTable label="Open invitations">
       <thead>
@@ -49,12 +58,7 @@ export function InvitationList({
                   variant="quiet"
                   aria-label={`Withdraw the invitation of ${invitation.email}`}
                   isBusy={cancel.isPending && cancel.variables === invitation.id}
-                  onClick={() =>
-                    cancel.mutate(invitation.id, {
-                      onSuccess: () => showToast(`Invitation of ${invitation.email} withdrawn`),
-                      onError: (error) => showToast(messageOf(error), 'bad'),
-                    })
-                  }
+                  onClick={() => void withdraw(invitation)}
                 >
                   Withdraw
                 </Button>

@@ -27,6 +27,16 @@ export function MemberRow({ workspaceId, member, isMe, canManage }: MemberRowPro
   // While the change is under way the row shows what was asked for; a refusal brings the old role back.
   const role = changeRole.isPending ? changeRole.variables.role : member.role
 
+  // Awaited here, because callbacks of the mutation die with the row.
+  const confirmRemoval = async () => {
+    try {
+      await remove.mutateAsync(member.id)
+      showToast(`${member.name} was removed`)
+    } catch {
+      // The dialog shows why.
+    }
+  }
+
   return (
     <li className="grid grid-cols-[minmax(0,1fr)_auto] items-center gap-x-4 gap-y-2 border-b border-hairline py-3 sm:grid-cols-[minmax(0,1fr)_11rem_8rem_5rem]">
       <div className="flex min-w-0 items-center gap-3">
@@ -76,14 +86,7 @@ export function MemberRow({ workspaceId, member, isMe, canManage }: MemberRowPro
               isDangerous
               isBusy={remove.isPending}
               error={remove.error ? messageOf(remove.error) : null}
-              onConfirm={() =>
-                remove.mutate(member.id, {
-                  onSuccess: () => {
-                    setIsRemoving(false)
-                    showToast(`${member.name} was removed`)
-                  },
-                })
-              }
+              onConfirm={() => void confirmRemoval()}
               onClose={() => setIsRemoving(false)}
             >
               <p>

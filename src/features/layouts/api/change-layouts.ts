@@ -12,7 +12,10 @@ export function useCreateLayout(workspaceId: string) {
         body,
         schema: layoutSummarySchema,
       }),
-    onSuccess: () => queryClient.invalidateQueries({ queryKey: queryKeys.layouts(workspaceId) }),
+    onSuccess: () => {
+      // Not awaited: what follows may be news about a card that the fresh list no longer has.
+      void queryClient.invalidateQueries({ queryKey: queryKeys.layouts(workspaceId) })
+    },
   })
 }
 
@@ -22,6 +25,9 @@ export function useUpdateLayout(workspaceId: string, layoutId: string) {
   return useMutation({
     mutationFn: (body: UpdateLayoutBody) =>
       request(`/api/layouts/${layoutId}`, { method: 'PATCH', body, schema: layoutSummarySchema }),
-    onSuccess: () => queryClient.invalidateQueries({ queryKey: queryKeys.layouts(workspaceId) }),
+    onSuccess: () => {
+      // Not awaited: what follows may be news about a card that the fresh list no longer has.
+      void queryClient.invalidateQueries({ queryKey: queryKeys.layouts(workspaceId) })
+    },
   })
 }

@@ -58,7 +58,7 @@ export function LayoutToolbar({ filter, isArchived, projects, setParameter }: La
       />
       {projects.length > 0 && (
         <SelectField
-          label="Project"
+          label="Projects shown"
           isLabelHidden
           options={projectOptions}
           value={filter.project === null ? ALL_PROJECTS : NAMED + filter.project}
