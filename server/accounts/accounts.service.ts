@@ -216,6 +216,7 @@ function slugFor(name: string): string {
   const words = name
     .toLowerCase()
     .normalize('NFKD')
+    .replace(/\p{M}/gu, '')
     .replace(/[^a-z0-9]+/g, '-')
     .replace(/^-+|-+$/g, '')
   return `${words || 'workspace'}-${randomBytes(4).toString('hex')}`

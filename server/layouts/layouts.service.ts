@@ -233,6 +233,7 @@ export function documentFromFile(content: unknown): LayoutDocument {
 function fileNameFor(name: string): string {
   const safe = name
     .normalize('NFKD')
+    .replace(/\p{M}/gu, '')
     .replace(/[^A-Za-z0-9]+/g, '-')
     .replace(/^-+|-+$/g, '')
     .slice(0, 80)
