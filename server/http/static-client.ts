@@ -23,7 +23,11 @@ export function staticClient(clientDir: string): Router {
 function sendPage(page: string): RequestHandler {
   return (request, response, next) => {
     // Only navigation gets the page; a missing file must not look like one.
-    if (request.path.startsWith('/api/') || path.extname(request.path) !== '' || !request.accepts('html')) {
+    if (
+      request.path.startsWith('/api/') ||
+      path.basename(request.path).includes('.') ||
+      !request.accepts('html')
+    ) {
       next()
       return
     }

@@ -8,6 +8,7 @@ import path from 'node:path'
 import { type Config, readConfig } from '@server/config'
 import { demoLayouts } from '@server/demo/layout-data'
 import { DEMO_PASSWORD, DEMO_PEOPLE } from '@server/demo/seed-demo'
+import { createLogger } from '@server/http/request-log'
 import { type RunningServer, startServer } from '@server/index'
 import type { CaughtMail } from '@shared/protocol/accounts'
 import type { Role } from '@shared/protocol/roles'
@@ -65,16 +66,24 @@ export const NEW_PERSON_PASSWORD = 'quiet lathe, loud press'
 export interface TestAppOptions {
   /** Serves these pages instead of the built client. */
   clientDir?: string
+  /** Gets the log, one JSON line an entry. */
+  logTo?: NodeJS.WritableStream
   environment?: Record<string, string>
 }
 
-export async function startTestApp({ environment = {}, clientDir }: TestAppOptions = {}): Promise<TestApp> {
+export async function startTestApp({
+  environment = {},
+  clientDir,
+  logTo,
+}: TestAppOptions = {}): Promise<TestApp> {
   const dataDir = mkdtempSync(path.join(tmpdir(), 'hubstead-test-'))
   const config = (): Config => ({
     ...readConfig({ NODE_ENV: 'test', PORT: '0', DATA_DIR: dataDir, LOG_LEVEL: 'silent', ...environment }),
     ...(clientDir ? { clientDir } : {}),
   })
-  let server = await startServer(config())
+  const start = (present: Config) =>
+    startServer(present, logTo ? { logger: createLogger(present, logTo) } : {})
+  let server = await start(config())
 
   const origin = () => server.url
   async function send(cookie: string, target: string, options: RequestOptions = {}): Promise<Answer> {
@@ -170,7 +179,7 @@ export async function startTestApp({ environment = {}, clientDir }: TestAppOptio
     async restart() {
       const { port } = server
       await server.close()
-      server = await startServer({ ...config(), port })
+      server = await start({ ...config(), port })
     },
     async close() {
       await server.close()
