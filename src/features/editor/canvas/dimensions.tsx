@@ -65,7 +65,8 @@ export const LiveDimensions = memo(function LiveDimensions({
           pen,
           stationToPx(view, fromMm),
           stationToPx(view, toMm),
-          isOverlap ? y + 24 : y,
+          // Inside the shaft, where the parts run into each other and nothing else is written.
+          isOverlap ? view.originYPx - 20 : y,
           isOverlap ? `✕ overlaps ${length}` : length,
           {
             font: FONT.strong,

@@ -140,7 +140,7 @@ export function LayoutCanvas({
                 <Group {...place}>
                   <PlacedParts document={document} states={states} isIncluded={(id) => moving.has(id)} />
                 </Group>
-                <Loads document={document} />
+                <Loads document={document} movingIds={display.movingIds} />
                 <BearingLabels document={document} states={states} />
                 <PartLabels document={document} states={states} />
                 <DimensionStrip document={document} />

@@ -1,5 +1,5 @@
 /** What lies over the parts: the centre line, the loads, and the handles of the selection. */
-import { memo, useCallback } from 'react'
+import { memo, useCallback, useMemo } from 'react'
 import type { LayoutDocument } from '@shared/layout/layout-document'
 import { totalLengthMm } from '@shared/layout/shaft-geometry'
 import { formatResult } from '@/lib/format-quantity'
@@ -37,22 +37,33 @@ export const CentreLine = memo(
   (a, b) => a.document.shaft === b.document.shaft,
 )
 
-export const Loads = memo(function Loads({ document }: { document: LayoutDocument }) {
+/** While a hub is in hand its live dimensions stand where its loads are; those come back when it is let go. */
+export const Loads = memo(function Loads({
+  document,
+  movingIds,
+}: {
+  document: LayoutDocument
+  movingIds: readonly string[]
+}) {
   const colours = useThemeColours()
   const units = usePreferencesStore((state) => state.units)
   const view = useViewStore((state) => state.view)
   const loadCaseId = useShownLoadCaseId(document)
   const selectedIds = useSelectionStore((state) => state.selectedIds)
   const hoveredId = useSelectionStore((state) => state.hoveredId)
+  const marks = useMemo(
+    () => loadMarks(document, loadCaseId).filter(({ hubId }) => !movingIds.includes(hubId)),
+    [document, loadCaseId, movingIds],
+  )
   const draw = useCallback(
     (pen: Pen) =>
-      drawLoads(pen, view, loadMarks(document, loadCaseId), {
+      drawLoads(pen, view, marks, {
         ink: colours.plum,
         ground: colours.paper,
         isLabelled: (hubId) => hubId === hoveredId || selectedIds.includes(hubId),
         forceText: (forceN) => formatResult(forceN, 'force', units).text,
       }),
-    [view, document, loadCaseId, colours, units, selectedIds, hoveredId],
+    [view, marks, colours, units, selectedIds, hoveredId],
   )
   return <Drawn draw={draw} />
 })

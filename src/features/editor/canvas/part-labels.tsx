@@ -78,6 +78,8 @@ export const PartLabels = memo(function PartLabels({
     (pen: Pen) => {
       const wishes: LabelWish[] = measureAll(pen, document, words, view).map((wish, index) => ({
         ...wish,
+        // Clear of the outline and the handle on top of a selected hub.
+        topPx: wish.topPx - (selectedIds.includes(wish.id) ? 7 : 0),
         isImportant: selectedIds.includes(wish.id) || words[index]?.state.verdict === 'fails',
       }))
       const bodies = document.bearings.map((bearing) => {

@@ -70,9 +70,9 @@ function drawPlacement(pen: Pen, view: ViewTransform, mark: PlacementMark, colou
   }
   pen.setLineDash([])
   if (mark.kind === 'load') drawLoadMark(pen, view, mark, colours)
-  const topPx = heightToPx(view, Math.abs(mark.outerRadiusMm))
-  const y = mark.kind === 'load' ? heightToPx(view, -Math.abs(mark.outerRadiusMm)) + 54 : topPx - 14
-  drawTag(pen, mark.caption, (left + right) / 2, Math.max(y, RULER_HEIGHT_PX + 12), {
+  // Within the shaft: above it are the names, below it the loads.
+  const y = view.originYPx + (mark.kind === 'load' ? 22 : -22)
+  drawTag(pen, mark.caption, (left + right) / 2, y, {
     font: FONT.strong,
     ink: mark.kind === 'load' ? colours.plum : colours.steel,
     ground: colours.card,
