@@ -51,7 +51,8 @@ export function Outline({
     useSelectionStore.getState().select([item.partId])
     const extent = partExtent(document, item.partId)
     if (extent) useViewStore.getState().reveal(extent.leftMm, extent.rightMm)
-    list.current?.querySelector<HTMLElement>(`[data-item="${CSS.escape(item.id)}"]`)?.focus()
+    const entries = list.current?.querySelectorAll<HTMLElement>('[data-item]') ?? []
+    for (const entry of entries) if (entry.dataset['item'] === item.id) entry.focus()
   }
 
   const changeLoad = (item: OutlineItem, event: KeyboardEvent): boolean => {
