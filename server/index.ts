@@ -6,7 +6,6 @@ import path from 'node:path'
 import type { Express, RequestHandler } from 'express'
 import type { Logger } from 'pino'
 import { createAccounts } from './accounts/accounts'
-import { hasUsers } from './accounts/accounts.repository'
 import { createRevocationHub } from './accounts/revocation'
 import { createApp } from './app'
 import { calculationRouter } from './calculation/calculation.router'
@@ -15,7 +14,7 @@ import { lockDataFolder } from './database/instance-lock'
 import { type AppDatabase, openDatabase } from './database/open-database'
 import { isUpToDate, loadMigrations, type MigrationFile, runMigrations } from './database/run-migrations'
 import { startingExamples } from './demo/layout-data'
-import { seedDemo } from './demo/seed-demo'
+import { makeDemoDatabase } from './demo/new-demo-database'
 import { siteFor } from './http/origin-check'
 import { createLogger } from './http/request-log'
 import { staticClient } from './http/static-client'
@@ -70,6 +69,7 @@ export async function startServer(config: Config, options: StartOptions = {}): P
     release.push(unlock)
 
     const migrations = await loadMigrations()
+    const isNewlySeeded = config.seedDemo && (await makeDemoDatabase(config, migrations, logger))
     const migrated = await runMigrations(config.databaseFile, migrations)
     if (migrated.applied.length > 0) logger.info(migrated, 'database migrated')
     // The table of sessions is as good as their cookies.
@@ -130,8 +130,6 @@ export async function startServer(config: Config, options: StartOptions = {}): P
       client: options.client ? await options.client(httpServer) : staticClient(config.clientDir),
     })
 
-    const isNewlySeeded = config.seedDemo && !hasUsers(database)
-    if (isNewlySeeded) await seedDemo(accounts, layouts)
     handle = app
     const realtime = attachRealtime(httpServer, { rooms, accounts, site, logger })
     release.push(() => {
@@ -155,7 +153,7 @@ export async function startServer(config: Config, options: StartOptions = {}): P
   }
 }
 
-/** The port is ours, the demo data is not there yet. */
+/** The port is ours, the parts behind it are not all there yet. */
 const stillStarting: RequestListener = (_request, response) => {
   response.writeHead(503, { 'Retry-After': '1', 'Content-Type': 'text/plain' }).end('Starting')
 }

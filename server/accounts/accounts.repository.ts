@@ -184,7 +184,3 @@ export function findPersonOfResetToken(queries: Queries, token: string) {
       .select(['user.name', 'user.email']),
   )
 }
-
-export function hasUsers(queries: Queries): boolean {
-  return queries.first(queries.kysely.selectFrom('user').select('id').limit(1)) !== undefined
-}

@@ -1,4 +1,4 @@
-/** Fills a new database, through the same services that people use. */
+/** The demo's people, workspace and layouts, made through the same services that people use. */
 import type { Role } from '@shared/protocol/roles'
 import type { Accounts } from '../accounts/accounts'
 import type { LayoutsService } from '../layouts/layouts.service'
@@ -16,12 +16,7 @@ export const DEMO_PEOPLE = [
   { name: 'Ada Winter', email: 'ada@cedar-line.example', role: 'admin' },
 ] as const satisfies { name: string; email: string; role: Role }[]
 
-export interface SeededDemo {
-  workspaceId: string
-  layoutIds: string[]
-}
-
-export async function seedDemo(accounts: Accounts, layouts: LayoutsService): Promise<SeededDemo> {
+export async function seedDemo(accounts: Accounts, layouts: LayoutsService): Promise<void> {
   const userIds = await Promise.all(
     DEMO_PEOPLE.map(({ name, email }) =>
       accounts.createConfirmedPerson({ name, email, password: DEMO_PASSWORD }),
@@ -37,12 +32,7 @@ export async function seedDemo(accounts: Accounts, layouts: LayoutsService): Pro
 
   const designer = accounts.principalOf(idOf('designer'))
   if (!designer) throw new Error('The demo designer is missing')
-  const layoutIds = demoLayouts().map(({ project, document }) => {
-    const summary = layouts.create(designer, workspaceId, {
-      project,
-      from: { kind: 'file', content: document },
-    })
-    return summary.id
-  })
-  return { workspaceId, layoutIds }
+  for (const { project, document } of demoLayouts()) {
+    layouts.create(designer, workspaceId, { project, from: { kind: 'file', content: document } })
+  }
 }
