@@ -53,6 +53,11 @@ export class MemoryLines {
     return pipe
   }
 
+  /** A message that the server never sent in this order. */
+  deliverTo(connectionId: string | null, event: string, message: unknown): void {
+    if (connectionId !== null) this.#toPipe(connectionId, event, message)
+  }
+
   /** What the server does when it learns that a connection is gone. */
   serverSeesClose(id: string): void {
     this.rooms.leave(id)
@@ -178,6 +183,15 @@ export class BrowserLine {
       if (!delivery) return
       delivery()
     }
+  }
+
+  /** Swallowed without a sign: the line still looks open. */
+  loseToServer(): void {
+    this.#pipe?.toServer.splice(0)
+  }
+
+  loseToClient(): void {
+    this.#pipe?.toClient.splice(0)
   }
 
   /** The network delivers the last edit twice. */
