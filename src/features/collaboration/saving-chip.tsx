@@ -83,7 +83,7 @@ export function SavingChip() {
     >
       {icon && <Icon name={icon} className="size-3.5" />}
       <span className="truncate max-lg:sr-only">{words}</span>
-      <span aria-hidden="true" className="lg:hidden">
+      <span aria-hidden="true" className={`lg:hidden ${tone === 'quiet' ? 'max-sm:hidden' : ''}`}>
         {short}
       </span>
     </span>

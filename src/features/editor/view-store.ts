@@ -9,11 +9,20 @@ import {
   zoomToBounds,
 } from '@/lib/view-transform'
 
-/** Room for the ruler and the names above the drawing, and for loads and dimensions below it. */
-export const DRAWING_MARGINS: ViewMargins = { left: 116, right: 28, top: 76, bottom: 88 }
-const NARROW_MARGINS: ViewMargins = { left: 16, right: 16, top: 80, bottom: 72 }
-
-const marginsFor = (widthPx: number) => (widthPx < 560 ? NARROW_MARGINS : DRAWING_MARGINS)
+/**
+ * Room for the ruler and the names above the drawing, for loads and dimensions below it, and for the
+ * tools at its left.
+ */
+export function drawingMargins(widthPx: number, heightPx: number): ViewMargins {
+  const isNarrow = widthPx < 560
+  return {
+    left: isNarrow ? 16 : 116,
+    right: isNarrow ? 16 : 28,
+    // Three lines of a failing hub's name and words.
+    top: 76,
+    bottom: Math.min(88, Math.max(62, heightPx * 0.24)),
+  }
+}
 
 interface ViewState {
   view: ViewTransform
@@ -57,7 +66,8 @@ export const useViewStore = create<ViewState>()((set, get) => ({
   showWhole: () => {
     const { bounds, widthPx, heightPx } = get()
     if (!bounds || widthPx === 0 || heightPx === 0) return
-    set({ view: zoomToBounds(bounds, widthPx, heightPx, marginsFor(widthPx)), isWhole: true })
+    const margins = drawingMargins(widthPx, heightPx)
+    set({ view: zoomToBounds(bounds, widthPx, heightPx, margins), isWhole: true })
   },
   pan: (dxPx, dyPx) => set((state) => ({ view: panBy(state.view, dxPx, dyPx), isWhole: false })),
   zoom: (factor, xPx, yPx) =>
@@ -66,8 +76,8 @@ export const useViewStore = create<ViewState>()((set, get) => ({
       isWhole: false,
     })),
   reveal: (leftMm, rightMm) => {
-    const { view, widthPx } = get()
-    const margins = marginsFor(widthPx)
+    const { view, widthPx, heightPx } = get()
+    const margins = drawingMargins(widthPx, heightPx)
     const leftPx = view.originXPx + leftMm * view.pxPerMm
     const rightPx = view.originXPx + rightMm * view.pxPerMm
     const overRight = rightPx - (widthPx - margins.right)

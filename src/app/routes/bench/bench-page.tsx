@@ -38,41 +38,44 @@ export function BenchPage({ layoutId }: { layoutId: string }) {
       <BenchBar layoutId={layoutId} />
       <BenchMessages layoutId={layoutId} />
       <main className="flex min-h-0 flex-1 flex-col">
-        <div className="flex min-h-0 flex-1">
-          <div className="flex min-w-0 flex-1 flex-col">
+        {/* Where there is little width the verdict runs over the inspector instead of breaking its line. */}
+        <div className="grid min-h-0 flex-1 grid-cols-[minmax(0,1fr)_auto_auto] grid-rows-[auto_minmax(0,1fr)]">
+          <div className="col-span-3 border-b border-hairline xl:col-span-1">
             <VerdictStrip />
-            <div className="relative flex min-h-0 flex-1 border-t border-hairline">
-              <Outline isOpen={open.outline} onOpenInspector={openInspector} />
-              <div className="flex min-w-0 flex-1 flex-col">
-                <Drawing
-                  document={document}
-                  viewExtras={<RegionMenu />}
-                  overlay={(place) => <PresenceOverlay {...place} />}
-                />
-                {open.diagrams && (
-                  <>
-                    <SplitHandle region="diagrams" direction="row" label="Height of the diagrams" />
-                    <div className="flex shrink-0" style={{ height: sizePx.diagrams }}>
-                      <Diagrams />
-                    </div>
-                  </>
-                )}
-              </div>
-              {open.endView && (
-                <div className="w-62 shrink-0 border-l border-hairline">
-                  <EndView document={document} />
-                </div>
+          </div>
+          <div className="relative col-start-1 row-start-2 flex min-h-0">
+            <Outline isOpen={open.outline} onOpenInspector={openInspector} />
+            <div className="flex min-w-0 flex-1 flex-col">
+              <Drawing
+                document={document}
+                viewExtras={<RegionMenu />}
+                overlay={(place) => <PresenceOverlay {...place} />}
+              />
+              {open.diagrams && (
+                <>
+                  <SplitHandle region="diagrams" direction="row" label="Height of the diagrams" />
+                  <div className="flex shrink-0" style={{ height: sizePx.diagrams }}>
+                    <Diagrams />
+                  </div>
+                </>
               )}
             </div>
+            {open.endView && (
+              <div className="w-62 shrink-0 border-l border-hairline">
+                <EndView document={document} />
+              </div>
+            )}
           </div>
           {open.inspector && (
             <>
-              <SplitHandle region="inspector" direction="column" label="Width of the inspector" />
+              <div className="col-start-2 row-start-2 flex xl:row-span-2 xl:row-start-1">
+                <SplitHandle region="inspector" direction="column" label="Width of the inspector" />
+              </div>
               <aside
                 ref={inspector}
                 aria-label="Inspector"
                 tabIndex={-1}
-                className="shrink-0 overflow-y-auto bg-card"
+                className="relative col-start-3 row-start-2 overflow-y-auto bg-card xl:row-span-2 xl:row-start-1"
                 style={{ width: sizePx.inspector }}
               >
                 <Inspector />
@@ -88,7 +91,7 @@ export function BenchPage({ layoutId }: { layoutId: string }) {
               className="flex shrink-0 flex-col border-t-2 border-bar bg-card"
               style={{ height: sizePx.tables }}
             >
-              <BenchTables tabs={TABLE_TABS} panelClassName="min-h-0 flex-1 overflow-auto" />
+              <BenchTables tabs={TABLE_TABS} panelClassName="relative min-h-0 flex-1 overflow-auto" />
             </section>
           </>
         )}

@@ -30,7 +30,7 @@ function firstRegions(): Regions {
   const isTall = window.innerHeight >= 850
   return {
     open: { outline: false, endView: isWide, diagrams: true, inspector: true, tables: true },
-    sizePx: { diagrams: isTall ? 172 : 144, inspector: isWide ? 356 : 288, tables: isTall ? 216 : 172 },
+    sizePx: { diagrams: isTall ? 172 : 128, inspector: isWide ? 356 : 288, tables: isTall ? 216 : 152 },
   }
 }
 

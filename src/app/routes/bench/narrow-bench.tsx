@@ -51,7 +51,7 @@ export function NarrowBench({ layoutId }: { layoutId: string }) {
         <div className="flex h-[42dvh] min-h-64 border-y border-hairline">
           <Drawing document={document} letsPageScroll overlay={(place) => <PresenceOverlay {...place} />} />
         </div>
-        <BenchTables tabs={tabs} panelClassName="min-h-64" />
+        <BenchTables tabs={tabs} panelClassName="relative min-h-64 overflow-x-auto" />
       </main>
       <FindingsAnnouncer />
       <DerivationDialog />

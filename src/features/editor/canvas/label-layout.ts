@@ -42,9 +42,9 @@ export interface LabelBox {
 
 export const LABEL_LINE_PX = 14
 const GAP_PX = 5
-const SIDE_GAP_PX = 5
-/** A shifted name still reaches over its hub by this much. */
-const KEPT_OVER_HUB_PX = 12
+const SIDE_GAP_PX = 3
+/** The middle of a shifted name stays over its hub, or this little beside it. */
+const OVER_THE_EDGE_PX = 4
 const SHIFT_STEP_PX = 8
 const RISE_STEP_PX = 4
 
@@ -91,9 +91,9 @@ function boxOf(half: number, centrePx: number, bottomPx: number, lines: number):
   }
 }
 
-/** Middles to try: over the hub first, then ever further to either side while still over a part of it. */
+/** Middles to try: over the hub first, then ever further to either side. */
 function centresToTry(wish: LabelWish, half: number, frame: LabelFrame): number[] {
-  const reach = half + (wish.rightPx - wish.leftPx) / 2 - KEPT_OVER_HUB_PX
+  const reach = (wish.rightPx - wish.leftPx) / 2 + OVER_THE_EDGE_PX
   const inFrame = (centre: number) =>
     frame.rightPx - frame.leftPx < 2 * half
       ? wish.centrePx

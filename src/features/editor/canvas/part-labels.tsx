@@ -141,19 +141,22 @@ export const BearingLabels = memo(function BearingLabels({
   const draw = useCallback(
     (pen: Pen) => {
       let lastRightPx = -Infinity
+      pen.font = FONT.strong
       for (const bearing of [...document.bearings].sort((a, b) => a.stationMm - b.stationMm)) {
         const extent = bearingExtent(document, bearing)
         const state = stateOf(states, bearing.id)
-        const words = `${bearing.name}, ${bearing.kind}`
-        const text = state.verdict === 'fails' ? `✕ ${bearing.name} ${state.words}` : words
-        pen.font = FONT.strong
-        const half = pen.measureText(text).width / 2 + 4
+        const isWrong = state.verdict === 'fails'
         const x = stationToPx(view, bearing.stationMm)
-        const isCovered = x - half < lastRightPx
-        lastRightPx = Math.max(lastRightPx, x + half)
+        const half = (text: string) => pen.measureText(text).width / 2 + 5
+        const whole = isWrong ? `✕ ${bearing.name} ${state.words}` : `${bearing.name}, ${bearing.kind}`
+        const short = isWrong ? `✕ ${bearing.name}` : bearing.name
+        // Beside a near neighbour the name alone has to do; where even that is too long it steps down.
+        const text = x - half(whole) < lastRightPx ? short : whole
+        const isCovered = x - half(text) < lastRightPx
+        lastRightPx = Math.max(lastRightPx, x + half(text))
         drawTag(pen, text, x, heightToPx(view, -extent.outerRadiusMm) + (isCovered ? 27 : 12), {
           font: FONT.strong,
-          ink: state.verdict === 'fails' ? colours.bad : colours.steel,
+          ink: isWrong ? colours.bad : colours.steel,
           ground: colours.paper,
         })
       }

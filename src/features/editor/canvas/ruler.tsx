@@ -10,6 +10,7 @@ import { Drawn, type Pen } from './drawn'
 import { rulerTicks } from './ruler-ticks'
 
 export const RULER_HEIGHT_PX = 26
+const UNIT_WIDTH_PX = 46
 
 export const StationGrid = memo(function StationGrid() {
   const colours = useThemeColours()
@@ -60,12 +61,11 @@ export const Ruler = memo(function Ruler() {
         const x = Math.round(stationToPx(view, tick.stationMm)) + 0.5
         pen.moveTo(x, RULER_HEIGHT_PX - (tick.label === null ? 4 : 9))
         pen.lineTo(x, RULER_HEIGHT_PX)
-        if (tick.label !== null) pen.fillText(tick.label, x, RULER_HEIGHT_PX - 12)
+        // The right end belongs to the unit.
+        if (tick.label !== null && x < widthPx - UNIT_WIDTH_PX)
+          pen.fillText(tick.label, x, RULER_HEIGHT_PX - 12)
       }
       pen.stroke()
-      pen.fillStyle = colours.paper
-      pen.fillRect(widthPx - 34, 0, 34, RULER_HEIGHT_PX - 10)
-      pen.fillStyle = colours.quiet
       pen.textAlign = 'right'
       pen.fillText(isInch ? 'in' : 'mm', widthPx - 8, RULER_HEIGHT_PX - 12)
     },

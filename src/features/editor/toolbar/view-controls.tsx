@@ -20,7 +20,7 @@ function HistoryControls() {
   const redoLabel = useLayoutStore((state) => state.redoLabel)
   if (!canEdit) return null
   return (
-    <>
+    <span className="contents max-md:hidden">
       <IconButton
         icon="undo"
         label={`Undo${undoLabel ? `: ${undoLabel}` : ''}${shortcutOf('undo')}`}
@@ -33,7 +33,7 @@ function HistoryControls() {
         disabled={!canRedo}
         onClick={() => run(actionById('redo'))}
       />
-    </>
+    </span>
   )
 }
 
