@@ -3,7 +3,7 @@
  * SQLite migrations: a failing one would leave half its tables behind. Here each migration and its
  * record commit together or not at all.
  */
-import { mkdirSync, readdirSync } from 'node:fs'
+import { chmodSync, mkdirSync, readdirSync } from 'node:fs'
 import path from 'node:path'
 import { fileURLToPath, pathToFileURL } from 'node:url'
 import type SqliteHandle from 'better-sqlite3'
@@ -126,5 +126,7 @@ async function backUp(handle: SqliteHandle.Database, file: string): Promise<stri
   const stamp = new Date().toISOString().replace(/[:.]/g, '-')
   const copy = path.join(folder, `before-migration-${stamp}.sqlite`)
   await handle.backup(copy)
+  // It holds sessions and password hashes like the original.
+  chmodSync(copy, 0o600)
   return copy
 }

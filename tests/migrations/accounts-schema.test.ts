@@ -1,38 +1,15 @@
 /** Our frozen tables are those the sign-in package expects, and hold what it does not check itself. */
-import { mkdtempSync, rmSync } from 'node:fs'
-import { tmpdir } from 'node:os'
-import path from 'node:path'
 import { getMigrations } from 'better-auth/db/migration'
-import { pino } from 'pino'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
-import { type Auth, createAuth } from '@server/accounts/auth'
-import { createRevocationHub } from '@server/accounts/revocation'
-import { loadMigrations, runMigrations } from '@server/database/run-migrations'
-import { siteFor } from '@server/http/origin-check'
-import { createMailer } from '@server/mail/mailer'
+import type { Auth } from '@server/accounts/auth'
+import { createTestAuth } from '../support/test-auth'
 
-let folder: string
 let auth: Auth
-const logger = pino({ level: 'silent' })
-const mailer = createMailer({ smtpUrl: 'smtp://127.0.0.1:1', from: 'a@hubstead.example', logger })
+let close: () => Promise<void>
 beforeAll(async () => {
-  folder = mkdtempSync(path.join(tmpdir(), 'hubstead-accounts-'))
-  const databaseFile = path.join(folder, 'test.sqlite')
-  await runMigrations(databaseFile, await loadMigrations())
-  auth = createAuth({
-    databaseFile,
-    site: siteFor(null, 4310),
-    sessionSecret: 'a secret for this test, long enough',
-    mailer,
-    revocations: createRevocationHub(),
-    logger,
-  })
+  ;({ auth, close } = await createTestAuth())
 })
-afterAll(async () => {
-  await mailer.close()
-  auth.handle.close()
-  rmSync(folder, { recursive: true, force: true })
-})
+afterAll(() => close())
 
 describe('the tables of accounts', () => {
   it('leave the package’s own planner of migrations nothing to do', async () => {

@@ -1,5 +1,5 @@
 /** Every migration all or nothing, in order, once, with a copy of the file from before. */
-import { mkdtempSync, rmSync } from 'node:fs'
+import { mkdtempSync, rmSync, statSync } from 'node:fs'
 import { tmpdir } from 'node:os'
 import path from 'node:path'
 import SqliteHandle from 'better-sqlite3'
@@ -145,6 +145,7 @@ describe('the copy from before', () => {
     read((handle) => handle.exec("insert into a values ('kept')"))
     const { backupFile } = await runMigrations(file, [table('a'), table('b')])
     expect(backupFile).toMatch(/backups\/before-migration-/)
+    expect(statSync(backupFile ?? '').mode & 0o777).toBe(0o600)
     expect(tables(backupFile ?? '')).toEqual(['a', 'schema_migration'])
     const copy = new SqliteHandle(backupFile ?? '', { readonly: true })
     expect(copy.prepare('select id from a').pluck().all()).toEqual(['kept'])
