@@ -156,7 +156,7 @@ function tickStep(span: number): number {
 /** Where everything lies over `width` units of drawing. Positions are clamped to the drawing. */
 export function windowGeometry(values: WindowValues, scale: WindowScale, width: number): WindowGeometry {
   const span = scale.toUm - scale.fromUm
-  const at = (um: number) => Math.min(width, Math.max(0, ((um - scale.fromUm) / span) * width))
+  const at = (um: number) => Math.min(width, Math.max(0, ((um - scale.fromUm) * width) / span))
   const { minUm, maxUm, requiredUm, permissibleUm } = values
   const state = windowState(values)
   const required = requiredUm === null ? null : at(requiredUm)

@@ -75,7 +75,7 @@ export function QuantityField(props: QuantityFieldProps) {
   const [message, setMessage] = useState<string | null>(() => keptDraft(props.draftKey)?.message ?? null)
   const [isFocused, setIsFocused] = useState(false)
   /** The value when typing began: previews change `value` under the typed text. */
-  const startValue = useRef<number | null>(null)
+  const startValue = useRef<number | null>(value ?? null)
 
   const unit = displayUnit(kind, system).symbol
 

@@ -53,7 +53,10 @@ export function FitSchedule() {
             setHeldOrder((held) => held ?? ordered.map(({ hub }) => hub.id))
         }}
         onBlur={(event) => {
-          if (!event.currentTarget.contains(event.relatedTarget)) setHeldOrder(null)
+          const isStillTyping =
+            event.relatedTarget instanceof HTMLInputElement &&
+            event.currentTarget.contains(event.relatedTarget)
+          if (!isStillTyping) setHeldOrder(null)
         }}
       >
         <table className="w-full border-collapse text-sm" onKeyDown={moveBetweenRows}>

@@ -29,7 +29,10 @@ export function announcement(
         .map((finding) => [`${finding.code}|${finding.part}`, finding]),
     )
   const now = failing(after)
-  if (before === null) return now.size === 0 ? 'Nothing fails.' : `${countWords(now.size)}.`
+  const count = after.filter(({ severity }) => severity === 'fails').length
+  const total =
+    count === 0 ? 'Nothing fails.' : `${count} ${count === 1 ? 'finding fails' : 'findings fail'}.`
+  if (before === null) return total
   const then = failing(before)
   const words = (findings: Finding[]) =>
     findings
@@ -41,10 +44,8 @@ export function announcement(
   return [
     added.length > 0 ? `New: ${words(added)}.` : '',
     mended.length > 0 ? `Mended: ${words(mended)}.` : '',
-    now.size === 0 ? 'Nothing fails.' : `${countWords(now.size)}.`,
+    total,
   ]
     .filter((sentence) => sentence !== '')
     .join(' ')
 }
-
-const countWords = (count: number) => `${count} ${count === 1 ? 'finding fails' : 'findings fail'}`

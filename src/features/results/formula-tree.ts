@@ -11,7 +11,10 @@ export type FormulaNode =
   | { kind: 'root'; content: FormulaNode }
   | { kind: 'group'; content: FormulaNode }
 
-const WORD = /^(?:[\p{L}\p{M}][\p{L}\p{M}\p{N}′']*|\d+(?:[.,]\d+)*(?:e[+-]?\d+)?)/u
+const WORD = /^(?:°[CF]|[\p{L}\p{M}][\p{L}\p{M}\p{N}′″']*|\d+(?:[.,]\d+)*(?:e[+-]?\d+)?)/u
+
+/** `1000 MPa` is one thing, also under a fraction bar. */
+const NUMBER_WITH_UNIT = /^\d+(?:\.\d+)? (?:MPa|mm|µm|N·m|°C)(?![\p{L}\p{N}])/u
 
 export function parseFormula(text: string): FormulaNode {
   return new FormulaReader(text.trim()).readRow(false)
@@ -44,10 +47,10 @@ class FormulaReader {
         if (above.length === 0) items.push(below)
         continue
       }
-      const operator = /^(?:[=<>≤≥≈+−–,;|]|- |-(?=\S))/u.exec(this.source.slice(this.position))?.[0]
+      const operator = /^[=<>≤≥≈+±−–,;-]/u.exec(this.source.slice(this.position))?.[0]
       if (operator !== undefined) {
-        this.position += operator.length
-        items.push({ kind: 'text', text: ` ${operator.trim().replace('-', '−')} ` })
+        this.position += 1
+        items.push({ kind: 'text', text: spaced(operator.replace(/[–-]/, '−'), items.at(-1)) })
         productStart = items.length
         continue
       }
@@ -113,7 +116,7 @@ class FormulaReader {
 
   private readWord(): string {
     const rest = this.source.slice(this.position)
-    const word = WORD.exec(rest)?.[0] ?? [...rest][0] ?? ''
+    const word = NUMBER_WITH_UNIT.exec(rest)?.[0] ?? WORD.exec(rest)?.[0] ?? [...rest][0] ?? ''
     this.position += word.length
     return word
   }
@@ -123,6 +126,15 @@ class FormulaReader {
     while (/\s/.test(this.source[this.position] ?? '')) this.position += 1
     return this.position > from
   }
+}
+
+const SEPARATOR = /[=<>≤≥≈+±−,;] ?$/
+
+/** Space around an operator; none before a comma, and none after a sign that belongs to what follows. */
+function spaced(operator: string, before: FormulaNode | undefined): string {
+  if (operator === ',' || operator === ';') return `${operator}  `
+  const isSign = before === undefined || (before.kind === 'text' && SEPARATOR.test(before.text))
+  return isSign && /[+±−]/.test(operator) ? operator : ` ${operator} `
 }
 
 const rowOf = (items: FormulaNode[]): FormulaNode =>

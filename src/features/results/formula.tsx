@@ -11,14 +11,15 @@ export function Formula({ text, className = '' }: { text: string; className?: st
   )
 }
 
-/** Letters are quantities and stand italic; numbers and marks stand upright. */
-const isQuantity = (text: string) =>
-  /^\p{L}/u.test(text) && !/^(?:min|max|sin|cos|tan|ln|lg|log|exp|for|if|and|or|with|sum|Σ)$/u.test(text)
+/** Symbols of one or two letters stand italic; words, functions, numbers and marks upright. */
+const UPRIGHT =
+  /^(?:of|is|at|on|to|in|by|no|or|if|ln|lg|and|the|its|for|max|min|sin|cos|tan|log|exp|det|sum)$/i
+const isSymbol = (text: string) => /^\p{L}/u.test(text) && [...text].length <= 3 && !UPRIGHT.test(text)
 
 function FormulaPart({ node }: { node: FormulaNode }) {
   switch (node.kind) {
     case 'text':
-      return <span className={`whitespace-pre ${isQuantity(node.text) ? 'italic' : ''}`}>{node.text}</span>
+      return <span className={`whitespace-pre ${isSymbol(node.text) ? 'italic' : ''}`}>{node.text}</span>
     case 'row':
       return node.items.map((item, index) => <FormulaPart key={index} node={item} />)
     case 'scripted':
