@@ -40,12 +40,9 @@ export default function ConfirmEmailRoute() {
       <h1 className="text-3xl font-extrabold tracking-tight">
         {failure ? 'The address is not confirmed' : 'Your address is confirmed'}
       </h1>
-      <p>{failure ? `${failure} Signing in offers to send the mail again.` : 'You can go on now.'}</p>
-      <Link
-        to={failure ? withNext(paths.signIn, next) : (next ?? paths.home)}
-        className={`${buttonClasses('primary')} w-fit`}
-      >
-        {failure ? 'Go to sign-in' : 'Continue'}
+      <p>{failure ? `${failure} Signing in offers to send the mail again.` : 'You can sign in now.'}</p>
+      <Link to={withNext(paths.signIn, next)} className={`${buttonClasses('primary')} w-fit`}>
+        Sign in
       </Link>
     </div>
   )
