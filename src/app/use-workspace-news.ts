@@ -30,6 +30,8 @@ function refresh(queryClient: QueryClient, workspaceId: string, what: WorkspaceC
     case 'layouts':
       return invalidate(queryKeys.layouts(workspaceId))
     case 'releases':
+      // One that is open may have been withdrawn.
+      invalidate(queryKeys.everyRelease)
       return invalidate(queryKeys.releases(workspaceId))
     case 'people':
       invalidate(queryKeys.people(workspaceId))

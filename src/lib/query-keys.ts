@@ -7,6 +7,7 @@ export const queryKeys = {
   layouts: (workspaceId: string) => ['layouts', workspaceId] as const,
   layout: (layoutId: string) => ['layout', layoutId] as const,
   releases: (workspaceId: string) => ['releases', workspaceId] as const,
+  everyRelease: ['release'] as const,
   release: (releaseId: string) => ['release', releaseId] as const,
   examples: ['examples'] as const,
   caughtMail: ['caughtMail'] as const,
