@@ -185,6 +185,8 @@ export function QuantityField(props: QuantityFieldProps) {
         arrangement === 'row' &&
           'grid grid-cols-[1fr_auto] items-center gap-x-3 border-b border-dashed border-hairline py-0.5',
         arrangement === 'stacked' && 'grid content-start gap-0.5',
+        // A sentence needs the whole row of a grid of narrow fields.
+        arrangement === 'stacked' && message !== null && 'col-span-full',
         props.className,
       )}
     >

@@ -99,7 +99,9 @@ export function LayoutTextField({
         aria-describedby={message === null ? undefined : `${id}-error`}
         className={classNames(
           'w-full min-w-0 rounded border bg-transparent font-semibold placeholder:font-normal placeholder:text-quiet focus:border-steel focus:bg-card focus:outline-2 focus:-outline-offset-1 focus:outline-steel',
-          arrangement === 'title' ? '-mx-1.5 px-1.5 py-0.5 text-lg leading-6 font-bold' : 'px-2 py-1 text-sm',
+          arrangement === 'title'
+            ? '-mx-1.5 px-1.5 py-0.5 text-base leading-6 font-bold'
+            : 'px-2 py-1 text-sm',
           arrangement === 'row' && 'w-32 text-right',
           message !== null
             ? 'border-bad bg-bad-soft'

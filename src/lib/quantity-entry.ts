@@ -184,10 +184,10 @@ class EntryReader {
     if (unitAt(rest, 0, units) !== null) throw new EntryError(ONE_UNIT)
     for (const other of Object.values(QUANTITY_KINDS)) {
       if (unitAt(rest, 0, other.units)?.length === word.length) {
-        throw new EntryError(`"${word}" does not belong here: this field takes ${noun}, such as ${example}`)
+        throw new EntryError(`"${word}" does not belong here; type ${noun}, such as ${example}`)
       }
     }
-    if (units.length === 0) throw new EntryError(`This field takes a plain number, such as ${example}`)
+    if (units.length === 0) throw new EntryError(`Type a plain number, such as ${example}`)
     throw new EntryError(`"${word.slice(0, 16)}" is not a unit known here; type ${example}`)
   }
 

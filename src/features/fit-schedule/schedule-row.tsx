@@ -146,7 +146,7 @@ function ScheduleRowContent({ row, layout, scale, units }: ScheduleRowViewProps)
         {isTooHot(row) && <span className="font-bold text-bad">✕ over limit </span>}
         {joiningText(row, units)}
       </Cell>
-      <Cell className="px-1.5! py-1! whitespace-nowrap">
+      <Cell className="py-1! pr-4! pl-1.5! whitespace-nowrap">
         {result?.assembly.order === null ? (
           <span className="font-bold text-bad">✕ blocked</span>
         ) : (

@@ -84,7 +84,7 @@ function Figures({ results, document, selected, units, isUpdating }: FiguresProp
   }
 
   return (
-    <div className={`flex flex-wrap gap-x-7 gap-y-2 ${isUpdating ? 'opacity-60' : ''}`}>
+    <div className={`flex flex-wrap gap-x-5 gap-y-2 xl:gap-x-7 ${isUpdating ? 'opacity-60' : ''}`}>
       <Figure
         value={
           seats.total === 0
@@ -199,13 +199,13 @@ function Figure({
   isCaptionBad?: boolean
 }) {
   return (
-    <div title={title === '' ? undefined : title}>
-      <p className={`text-lg leading-6 font-bold tabular-nums ${TONES[tone]}`}>
+    <div title={title === '' ? undefined : title} className="max-w-44 xl:max-w-none">
+      <p className={`text-base leading-6 font-bold whitespace-nowrap tabular-nums xl:text-lg ${TONES[tone]}`}>
         {tone === 'bad' && <span aria-hidden="true">✕ </span>}
         {tone === 'bad' && <span className="sr-only">Fails: </span>}
         {value}
       </p>
-      <p className={`text-xs ${isCaptionBad ? 'font-semibold text-bad' : 'text-quiet'}`}>
+      <p className={`text-xs text-balance ${isCaptionBad ? 'font-semibold text-bad' : 'text-quiet'}`}>
         {isCaptionBad && <span aria-hidden="true">✕ </span>}
         {caption}
       </p>

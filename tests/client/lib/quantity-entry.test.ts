@@ -131,9 +131,9 @@ describe('radial interference', () => {
 describe('what cannot be read says what to type', () => {
   it.each<[string, QuantityKind, RegExp]>([
     ['', 'length', /^Enter a length, such as 50 mm or 2 in$/],
-    ['12 kg', 'length', /"kg" does not belong here: this field takes a length/],
+    ['12 kg', 'length', /"kg" does not belong here; type a length/],
     ['12 parsec', 'length', /"parsec" is not a unit known here/],
-    ['12 mm', 'ratio', /"mm" does not belong here: this field takes a plain number/],
+    ['12 mm', 'ratio', /"mm" does not belong here; type a plain number/],
     ['5/0', 'length', /divides by zero/],
     ['(5 + 2', 'length', /A bracket is not closed/],
     ['5 +', 'length', /A number is missing at the end/],
