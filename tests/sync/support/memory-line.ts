@@ -130,7 +130,7 @@ export class BrowserLine {
   readonly submitted: { editId: string; clientId: string; clientSeq: number }[] = []
 
   constructor(
-    private readonly lines: MemoryLines,
+    private lines: MemoryLines,
     private readonly principal: () => Principal,
   ) {}
 
@@ -183,6 +183,11 @@ export class BrowserLine {
       if (!delivery) return
       delivery()
     }
+  }
+
+  /** From the next opening on it leads to another server. */
+  moveTo(lines: MemoryLines): void {
+    this.lines = lines
   }
 
   /** Swallowed without a sign: the line still looks open. */
