@@ -2,6 +2,7 @@
 import { existsSync } from 'node:fs'
 import path from 'node:path'
 import express, { type RequestHandler, Router } from 'express'
+import { compressedAssets } from './compressed-assets'
 import { HttpError } from './http-error'
 
 const YEAR_MS = 365 * 24 * 3600 * 1000
@@ -14,6 +15,7 @@ export function staticClient(clientDir: string): Router {
     maxAge: YEAR_MS,
     index: false,
   })
+  router.use('/assets', compressedAssets(path.join(clientDir, 'assets')))
   router.use('/assets', assets)
   router.use(express.static(clientDir, { index: false, maxAge: 0 }))
   router.get('/{*path}', sendPage(path.join(clientDir, 'index.html')))

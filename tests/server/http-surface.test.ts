@@ -40,6 +40,13 @@ describe('pages', () => {
     const asset = await nobody.get('/assets/app-abc123.js')
     expect(asset.headers.get('cache-control')).toBe('public, max-age=31536000, immutable')
     expect(asset.headers.get('content-type')).toContain('javascript')
+    // fetch undoes the compression, so the content is what a browser would run.
+    expect(asset.headers.get('content-encoding')).toBe('gzip')
+    expect(asset.text).toBe('export {}')
+    const plain = await nobody.request('/assets/app-abc123.js', {
+      headers: { 'accept-encoding': 'identity' },
+    })
+    expect([plain.headers.get('content-encoding'), plain.text]).toEqual([null, 'export {}'])
   })
 
   it.each(['/assets/gone-000.js', '/favicon.ico', '/assets/..%2f..%2fpackage.json', '/.env'])(
