@@ -91,6 +91,7 @@ function computeHub(seat: Seat, resolved: ResolvedSeat): HubCalculation {
       diameterMm: resolved.diameterMm,
       effectiveLengthMm: finiteOrNull(toMm(seat.effectiveLength)),
     },
+    isBrittle: hub.material.isBrittle,
     governingLoadCase: governingCase(
       states.map((state) => ({
         id: state.seatCase.id,
@@ -161,6 +162,7 @@ function unresolvedHub(id: string, side: Joining['side'], resolved: ResolvedSeat
         diameterMm: resolved.diameterMm,
         effectiveLengthMm: resolved.effectiveLengthMm,
       },
+      isBrittle: false,
       governingLoadCase: null,
       verdict: 'notComputable',
       notComputable: resolved.problems.map((problem) => problem.reason),

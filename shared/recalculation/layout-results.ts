@@ -126,6 +126,8 @@ export interface HubResult {
   }
   // beyond the file contract
   seat: { sectionId: string | null; diameterMm: number | null; effectiveLengthMm: number | null }
+  /** Judged by hoop tension against tensile strength; false while the material is unknown. */
+  isBrittle: boolean
   /** The load case with the least slip safety against its own limit. */
   governingLoadCase: string | null
   verdict: 'passes' | 'fails' | 'notComputable'
