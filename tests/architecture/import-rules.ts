@@ -71,6 +71,14 @@ const SHARED_ZONES: Zone[] = [
     why: 'recalculation joins the document to the core and runs in browser, worker and server alike',
   },
   {
+    name: 'shared/validation',
+    files: ['shared/validation/**'],
+    mayImport: ['shared/validation/**', 'shared/engineering/**'],
+    packages: [],
+    mayUseNode: false,
+    why: 'checks against published values run in the browser, on the command line and in the tests alike',
+  },
+  {
     name: 'shared/drawing',
     files: ['shared/drawing/**'],
     mayImport: ['shared/drawing/**', 'shared/layout/**', 'shared/recalculation/**'],

@@ -294,6 +294,27 @@ export const SOURCE_REGISTRY = [
     clauses: 'K ± ωΩG − ω²M, synchronous unbalance response, de Laval (Jeffcott) rotor',
     isFromMemory: true,
   },
+  {
+    id: 'iso-286-2-cor',
+    citation: 'ISO 286-2:1988, Technical Corrigendum 1',
+    edition: '2006',
+    clauses: 'corrected limits of A13 and E8',
+    isFromMemory: false,
+  },
+  {
+    id: 'ansi-b4-2',
+    citation: "ANSI B4.2, Preferred metric limits and fits, as tabulated in Machinery's Handbook",
+    edition: '1978',
+    clauses: 'limits of preferred shafts and holes',
+    isFromMemory: true,
+  },
+  {
+    id: 'nist-sp-811',
+    citation: 'NIST Special Publication 811, Guide for the Use of the International System of Units',
+    edition: '2008',
+    clauses: 'Appendix B: conversion factors',
+    isFromMemory: true,
+  },
 ] as const satisfies readonly Source[]
 
 export type SourceId = (typeof SOURCE_REGISTRY)[number]['id']
