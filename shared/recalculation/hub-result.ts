@@ -2,12 +2,14 @@
 import { governingCase } from '../engineering/load-cases/governing-case'
 import { outerDiameterGrowth } from '../engineering/interference-fit/hub-stress'
 import { interfacePressure } from '../engineering/interference-fit/interface-pressure'
+import type { Length } from '../engineering/quantities/quantity'
 import { metre, toMm, toMPa, toUm } from '../engineering/quantities/units'
 import { attempt, finiteOrNull } from './attempt'
 import { hubFindings } from './hub-findings'
 import { joiningFigures } from './hub-assembly'
 import type { Finding, HubLoadCaseResult, HubResult } from './layout-results'
 import { memoise } from './memoise'
+import { seatKey } from './seat-key'
 import type { Joining, ResolvedSeat, Seat } from './seat'
 import { caseState, restState, type SeatCaseState, type TightState } from './seat-state'
 import { seatWindow } from './seat-window'
@@ -22,12 +24,12 @@ export interface HubCalculation {
   rest: TightState | null
 }
 
-const hubCache = memoise<HubCalculation>(600)
+const hubCache = memoise<HubCalculation>(300)
 
 export function calculateHub(id: string, side: Joining['side'], resolved: ResolvedSeat): HubCalculation {
   const { seat } = resolved
   if (!seat) return unresolvedHub(id, side, resolved)
-  return hubCache(JSON.stringify(seat), () => {
+  return hubCache(seatKey(seat), () => {
     const attempted = attempt(() => computeHub(seat, resolved))
     return attempted.reason === null
       ? attempted.value
@@ -52,9 +54,9 @@ function computeHub(seat: Seat, resolved: ResolvedSeat): HubCalculation {
   const result: HubResult = {
     id: seat.id,
     interference: {
-      minUm: finiteOrNull(toUm(seat.interference.min)),
-      maxUm: finiteOrNull(toUm(seat.interference.max)),
-      embeddingLossUm: finiteOrNull(toUm(seat.embedding)),
+      minUm: wholePicometres(seat.interference.min),
+      maxUm: wholePicometres(seat.interference.max),
+      embeddingLossUm: wholePicometres(seat.embedding),
     },
     window: {
       requiredUm: window.required && finiteOrNull(toUm(window.required.interference)),
@@ -103,6 +105,11 @@ function computeHub(seat: Seat, resolved: ResolvedSeat): HubCalculation {
     notComputable: [],
   }
   return { result, findings, seat, states, rest }
+}
+
+/** Table values are tenths of a micrometre; the way through metres must not leave 44.99999999999999. */
+function wholePicometres(length: Length): number | null {
+  return finiteOrNull(Math.round(toUm(length) * 1e6) / 1e6)
 }
 
 function caseResult(state: SeatCaseState): HubLoadCaseResult {

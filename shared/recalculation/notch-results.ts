@@ -1,17 +1,11 @@
 /** Static and fatigue safety at the notches of one load case. */
 import { mm, newton, newtonMetre, pascal, toMPa } from '../engineering/quantities/units'
-import { enduranceLimit } from '../engineering/shaft/endurance-limit'
 import { fatigueSafety } from '../engineering/shaft/fatigue-safety'
 import type { DiagramStation, SectionForces } from '../engineering/shaft/section-forces'
 import { equivalentStress, nominalStress } from '../engineering/shaft/shaft-stress'
 import type { NotchResult } from './layout-results'
 import type { Notch } from './notches'
 import type { ShaftCaseInputs } from './shaft-case-result'
-
-/** Seats and the sections beside them are ground. */
-const SURFACE = 'ground'
-/** Half of the shafts survive; the safety asked carries the scatter. */
-const RELIABILITY_FACTOR = 1
 
 export function notchResults(inputs: ShaftCaseInputs, forces: SectionForces): NotchResult[] {
   return inputs.notches.map((notch) => notchResult(inputs, forces, notch))
@@ -45,7 +39,7 @@ function notchResult(inputs: ShaftCaseInputs, forces: SectionForces, notch: Notc
       torsionMeanFactor: meanFactors.torsion,
     },
     {
-      endurance: enduranceLimit(tensileStrength, diameter, SURFACE, RELIABILITY_FACTOR).value,
+      endurance: notch.endurance,
       tensile: tensileStrength,
       yield: yieldStrength,
     },
@@ -70,20 +64,19 @@ const finitePositive = (value: number) => (Number.isFinite(value) ? value : null
 
 /** Largest forces on either side of a station. */
 function worstBeside(stations: readonly DiagramStation[], forces: SectionForces, station: number) {
-  let bending = 0
+  let bendingSquare = 0
   let torque = 0
   let axial = 0
   for (let index = firstAtOrAfter(stations, station - 1e-8); index < stations.length; index += 1) {
     if ((stations[index]?.station ?? 0) > station + 1e-8) break
-    bending = Math.max(
-      bending,
-      Math.hypot(forces.bendingY[index] as number, forces.bendingZ[index] as number),
-    )
+    const aboutY = forces.bendingY[index] as number
+    const aboutZ = forces.bendingZ[index] as number
+    bendingSquare = Math.max(bendingSquare, aboutY * aboutY + aboutZ * aboutZ)
     torque = Math.max(torque, Math.abs(forces.torque[index] as number))
     if (Math.abs(forces.axialForce[index] as number) > Math.abs(axial))
       axial = forces.axialForce[index] as number
   }
-  return { bending, torque, axial }
+  return { bending: Math.sqrt(bendingSquare), torque, axial }
 }
 
 function firstAtOrAfter(stations: readonly DiagramStation[], station: number): number {

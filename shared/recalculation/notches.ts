@@ -1,6 +1,8 @@
 /** The sections of the shaft where fatigue may start: seat edges and shoulders. */
 import type { Material } from '../engineering/materials/material'
+import type { Pressure } from '../engineering/quantities/quantity'
 import { mm } from '../engineering/quantities/units'
+import { enduranceLimit } from '../engineering/shaft/endurance-limit'
 import {
   fatigueNotchFactors,
   seatEdgeNotchFactors,
@@ -21,7 +23,16 @@ export interface Notch {
   diameterMm: number
   boreMm: number
   factors: NotchFactors
+  endurance: Pressure
 }
+
+/** Seats and the sections beside them are ground. */
+const SURFACE = 'ground'
+/** Half of the shafts survive; the safety asked carries the scatter. */
+const RELIABILITY_FACTOR = 1
+
+const enduranceAt = (diameterMm: number, material: Material) =>
+  enduranceLimit(material.tensileStrength, mm(diameterMm), SURFACE, RELIABILITY_FACTOR).value
 
 export function notchesOf(document: LayoutDocument, inputs: ShaftInputs): Notch[] {
   const { material } = inputs
@@ -37,7 +48,7 @@ function seatEdges(document: LayoutDocument, material: Material): Notch[] {
   const rings = document.bearings.filter((bearing) => bearing.housing === 'ring').map(bearingExtent)
   return [...document.hubs, ...rings].flatMap((part) => {
     const seat = seatUnder(document, part)
-    return seat ? edgesOf(part.id, seat, factors) : []
+    return seat ? edgesOf(part.id, seat, factors, material) : []
   })
 }
 
@@ -49,8 +60,9 @@ function bearingExtent(bearing: Bearing): Pick<Hub, 'id' | 'stationMm' | 'length
   }
 }
 
-function edgesOf(part: string, seat: Seat, factors: NotchFactors): Notch[] {
+function edgesOf(part: string, seat: Seat, factors: NotchFactors, material: Material): Notch[] {
   const { section } = seat.span
+  const endurance = enduranceAt(section.outerDiameterMm, material)
   return [seat.startMm, seat.endMm].map((stationMm) => ({
     stationMm,
     kind: 'seatEdge',
@@ -58,6 +70,7 @@ function edgesOf(part: string, seat: Seat, factors: NotchFactors): Notch[] {
     diameterMm: section.outerDiameterMm,
     boreMm: section.boreDiameterMm,
     factors,
+    endurance,
   }))
 }
 
@@ -83,6 +96,7 @@ function shoulders({ spans }: ShaftInputs, material: Material): Notch[] {
         diameterMm: small.outerDiameterMm,
         boreMm: Math.max(left.section.boreDiameterMm, right.section.boreDiameterMm),
         factors: fatigueNotchFactors(concentration, mm(radiusMm), material.tensileStrength),
+        endurance: enduranceAt(small.outerDiameterMm, material),
       },
     ]
   })

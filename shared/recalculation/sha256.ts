@@ -2,8 +2,8 @@
  * SHA-256 (FIPS 180-4) over UTF-8 text. The same code runs in the browser, the worker and Node and
  * answers at once, which the hash functions of the platforms do not offer together.
  */
-const ROUND_CONSTANTS = new Uint32Array(64)
-const INITIAL = new Uint32Array(8)
+const ROUND_CONSTANTS = new Int32Array(64)
+const INITIAL = new Int32Array(8)
 
 /** First 32 bits of the fractional part. */
 const fraction = (value: number) => Math.floor((value - Math.floor(value)) * 2 ** 32)
@@ -36,44 +36,44 @@ function padded(text: string): DataView {
   return view
 }
 
-const rotate = (word: number, by: number) => (word >>> by) | (word << (32 - by))
-
 export function sha256Hex(text: string): string {
   const message = padded(text)
-  const state = Uint32Array.from(INITIAL)
-  const words = new Uint32Array(64)
+  const state = Int32Array.from(INITIAL)
+  const words = new Int32Array(64)
   for (let offset = 0; offset < message.byteLength; offset += 64) {
-    for (let index = 0; index < 16; index += 1) words[index] = message.getUint32(offset + index * 4)
-    for (let index = 16; index < 64; index += 1) {
-      const early = words[index - 15] as number
-      const late = words[index - 2] as number
-      const small0 = rotate(early, 7) ^ rotate(early, 18) ^ (early >>> 3)
-      const small1 = rotate(late, 17) ^ rotate(late, 19) ^ (late >>> 10)
-      words[index] = (words[index - 16] as number) + small0 + (words[index - 7] as number) + small1
-    }
+    for (let index = 0; index < 16; index += 1) words[index] = message.getInt32(offset + index * 4)
+    expand(words)
     compress(state, words)
   }
-  return Array.from(state, (word) => word.toString(16).padStart(8, '0')).join('')
+  return Array.from(state, (word) => (word >>> 0).toString(16).padStart(8, '0')).join('')
 }
 
-function compress(state: Uint32Array, words: Uint32Array): void {
-  let [a, b, c, d, e, f, g, h] = state as unknown as [
-    number,
-    number,
-    number,
-    number,
-    number,
-    number,
-    number,
-    number,
-  ]
+function expand(words: Int32Array): void {
+  for (let index = 16; index < 64; index += 1) {
+    const early = words[index - 15] as number
+    const late = words[index - 2] as number
+    const small0 = ((early >>> 7) | (early << 25)) ^ ((early >>> 18) | (early << 14)) ^ (early >>> 3)
+    const small1 = ((late >>> 17) | (late << 15)) ^ ((late >>> 19) | (late << 13)) ^ (late >>> 10)
+    words[index] = ((words[index - 16] as number) + small0 + (words[index - 7] as number) + small1) | 0
+  }
+}
+
+/** Words stay 32-bit integers throughout, which engines keep in registers. */
+function compress(state: Int32Array, words: Int32Array): void {
+  let a = state[0] as number
+  let b = state[1] as number
+  let c = state[2] as number
+  let d = state[3] as number
+  let e = state[4] as number
+  let f = state[5] as number
+  let g = state[6] as number
+  let h = state[7] as number
   for (let round = 0; round < 64; round += 1) {
-    const big1 = rotate(e, 6) ^ rotate(e, 11) ^ rotate(e, 25)
+    const big1 = ((e >>> 6) | (e << 26)) ^ ((e >>> 11) | (e << 21)) ^ ((e >>> 25) | (e << 7))
     const choice = (e & f) ^ (~e & g)
     const first = (h + big1 + choice + (ROUND_CONSTANTS[round] as number) + (words[round] as number)) | 0
-    const big0 = rotate(a, 2) ^ rotate(a, 13) ^ rotate(a, 22)
+    const big0 = ((a >>> 2) | (a << 30)) ^ ((a >>> 13) | (a << 19)) ^ ((a >>> 22) | (a << 10))
     const majority = (a & b) ^ (a & c) ^ (b & c)
-    const second = (big0 + majority) | 0
     h = g
     g = f
     f = e
@@ -81,8 +81,14 @@ function compress(state: Uint32Array, words: Uint32Array): void {
     d = c
     c = b
     b = a
-    a = (first + second) | 0
+    a = (first + big0 + majority) | 0
   }
-  const next = [a, b, c, d, e, f, g, h]
-  for (let index = 0; index < 8; index += 1) state[index] = (state[index] as number) + (next[index] as number)
+  state[0] = ((state[0] as number) + a) | 0
+  state[1] = ((state[1] as number) + b) | 0
+  state[2] = ((state[2] as number) + c) | 0
+  state[3] = ((state[3] as number) + d) | 0
+  state[4] = ((state[4] as number) + e) | 0
+  state[5] = ((state[5] as number) + f) | 0
+  state[6] = ((state[6] as number) + g) | 0
+  state[7] = ((state[7] as number) + h) | 0
 }

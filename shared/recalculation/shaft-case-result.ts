@@ -1,22 +1,15 @@
 /** One load case of the shaft: reactions, curves, stresses and fatigue, in the keys of the results. */
 import { EngineeringInputError } from '../engineering/engineering-input-error'
 import { torqueBalance } from '../engineering/load-cases/torque-balance'
-import type { Pressure } from '../engineering/quantities/quantity'
 import { mm, newton, newtonMetre, toMPa, toMrad, toUm } from '../engineering/quantities/units'
-import { shapeAt, type ShapePoint } from '../engineering/shaft/beam-shape'
+import { shapeAt, shapeCurves, type ShapePoint } from '../engineering/shaft/beam-shape'
 import { solveBeam, type BeamSolution, type FactoredBeam } from '../engineering/shaft/beam-solver'
 import { sectionForces, type DiagramStation, type SectionForces } from '../engineering/shaft/section-forces'
-import { segmentAt, type ShaftLoad, type ShaftModel } from '../engineering/shaft/shaft-model'
-import { equivalentStressUnderSeat, nominalStress } from '../engineering/shaft/shaft-stress'
+import type { ShaftLoad, ShaftModel, ShaftSegment } from '../engineering/shaft/shaft-model'
+import { equivalentStressCourse } from '../engineering/shaft/shaft-stress'
 import type { ShaftDiagrams, ShaftLoadCaseResult, StationValue } from './layout-results'
 import { notchResults } from './notch-results'
 import type { Notch } from './notches'
-
-export interface SeatPressure {
-  startMm: number
-  endMm: number
-  pressure: Pressure
-}
 
 interface Place {
   part: string
@@ -34,7 +27,10 @@ export interface ShaftCaseInputs {
   locatingId: string | null
   /** Where slope and deflection are reported. */
   places: readonly Place[]
-  pressures: readonly SeatPressure[]
+  /** Interface pressure over each station at the most interference; 0 beside seats. */
+  pressures: Float64Array
+  /** Section under each station, on its side of a step. */
+  sections: readonly ShaftSegment[]
   notches: readonly Notch[]
 }
 
@@ -103,58 +99,50 @@ function reactionLoads(inputs: ShaftCaseInputs, reactions: ShaftLoadCaseResult['
 }
 
 function diagramsOf(inputs: ShaftCaseInputs, solution: BeamSolution, forces: SectionForces): ShaftDiagrams {
-  const { stations, model, applicationFactor } = inputs
-  const diagrams: ShaftDiagrams = {
-    stationMm: [],
+  const shape = shapeCurves(inputs.beam, solution, inputs.stations)
+  const bending = lengths(forces.bendingY, forces.bendingZ, 1)
+  // stresses are judged with the application factor, forces and deflections are shown without
+  const stress = equivalentStressCourse(
+    {
+      bending,
+      torque: forces.torque,
+      axialForce: forces.axialForce,
+      pressure: inputs.pressures,
+      sections: inputs.sections,
+    },
+    inputs.applicationFactor,
+  )
+  return {
+    stationMm: inputs.stations.map(({ station }) => station * 1e3),
     torqueNm: Array.from(forces.torque),
     bendingYNm: Array.from(forces.bendingY),
     bendingZNm: Array.from(forces.bendingZ),
-    deflectionUm: [],
-    equivalentMPa: [],
-    bendingNm: [],
+    deflectionUm: Array.from(lengths(shape.deflectionY, shape.deflectionZ, 1e6)),
+    equivalentMPa: Array.from(scaled(stress, 1e-6)),
+    bendingNm: Array.from(bending),
     shearYN: Array.from(forces.shearY),
     shearZN: Array.from(forces.shearZ),
-    deflectionYUm: [],
-    deflectionZUm: [],
-    slopeMrad: [],
+    deflectionYUm: Array.from(scaled(shape.deflectionY, 1e6)),
+    deflectionZUm: Array.from(scaled(shape.deflectionZ, 1e6)),
+    slopeMrad: Array.from(lengths(shape.slopeY, shape.slopeZ, 1e3)),
   }
-  const pressureAt = pressureLookup(inputs.pressures)
-  stations.forEach(({ station, side }, index) => {
-    const shape = shapeAt(inputs.beam, solution, station)
-    const bending = Math.hypot(forces.bendingY[index] as number, forces.bendingZ[index] as number)
-    diagrams.stationMm.push(station * 1e3)
-    diagrams.bendingNm.push(bending)
-    diagrams.deflectionUm.push(deflectionUm(shape))
-    diagrams.deflectionYUm.push(toUm(shape.deflectionY))
-    diagrams.deflectionZUm.push(toUm(shape.deflectionZ))
-    diagrams.slopeMrad.push(slopeMrad(shape))
-    const segment = segmentAt(model, side === 'left' ? station - 1e-9 : station + 1e-9, side)
-    if (!segment) return
-    // stresses are judged with the application factor, forces and deflections are shown without
-    const stress = nominalStress(
-      newtonMetre(bending * applicationFactor),
-      newtonMetre((forces.torque[index] as number) * applicationFactor),
-      newton((forces.axialForce[index] as number) * applicationFactor),
-      segment.outerDiameter,
-      segment.bore,
-    )
-    const pressure = pressureAt(station * 1e3, side)
-    diagrams.equivalentMPa.push(
-      toMPa(equivalentStressUnderSeat(stress, pressure, segment.outerDiameter, segment.bore)),
-    )
-  })
-  return diagrams
 }
 
-/** Pressure of the seat under a station; at an edge the side decides. */
-function pressureLookup(pressures: readonly SeatPressure[]) {
-  return (stationMm: number, side: 'left' | 'right'): Pressure => {
-    const inside = side === 'left' ? stationMm - 1e-6 : stationMm + 1e-6
-    let most = 0
-    for (const seat of pressures)
-      if (inside > seat.startMm && inside < seat.endMm && seat.pressure > most) most = seat.pressure
-    return most as Pressure
+/** Resultants of two planes, in the unit of the results. */
+function lengths(one: Float64Array, other: Float64Array, unit: number): Float64Array {
+  const result = new Float64Array(one.length)
+  for (let index = 0; index < result.length; index += 1) {
+    const a = one[index] as number
+    const b = other[index] as number
+    result[index] = Math.sqrt(a * a + b * b) * unit
   }
+  return result
+}
+
+function scaled(values: Float64Array, unit: number): Float64Array {
+  const result = new Float64Array(values.length)
+  for (let index = 0; index < result.length; index += 1) result[index] = (values[index] as number) * unit
+  return result
 }
 
 function largest(stations: readonly number[], values: readonly number[]): StationValue | null {
@@ -167,17 +155,14 @@ function largest(stations: readonly number[], values: readonly number[]): Statio
 
 /** Sizes far outside engineering can overflow; then the whole case is "not computable". */
 function requireFiniteResult(result: ShaftLoadCaseResult): void {
-  const isFiniteList = (values: readonly number[]) => values.every(Number.isFinite)
-  const numbers = [
-    ...result.reactions.flatMap((reaction) => [reaction.yN, reaction.zN, reaction.axialN]),
-    ...result.slopes.map((slope) => slope.mrad),
-    ...result.deflections.map((deflection) => deflection.um),
-    ...result.notches.flatMap((notch) => [notch.equivalentMPa, notch.bendingNm, notch.torqueNm]),
-    result.torqueResidualNm,
-    result.yieldSafety ?? 0,
-    result.fatigueSafety?.value ?? 0,
-  ]
-  if (!isFiniteList(numbers) || !Object.values(result.diagrams).every(isFiniteList))
+  // a sum is finite only when every term is
+  let sum = result.torqueResidualNm + (result.yieldSafety ?? 0) + (result.fatigueSafety?.value ?? 0)
+  for (const reaction of result.reactions) sum += reaction.yN + reaction.zN + reaction.axialN
+  for (const slope of result.slopes) sum += slope.mrad
+  for (const deflection of result.deflections) sum += deflection.um
+  for (const notch of result.notches) sum += notch.equivalentMPa + notch.bendingNm + notch.torqueNm
+  for (const curve of Object.values(result.diagrams) as number[][]) for (const value of curve) sum += value
+  if (!Number.isFinite(sum))
     throw new EngineeringInputError(
       'notFinite',
       'shaft',

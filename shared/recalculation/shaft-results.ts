@@ -4,6 +4,7 @@ import { toRpm } from '../engineering/quantities/units'
 import { factorBeam, type FactoredBeam } from '../engineering/shaft/beam-solver'
 import { lateralFrequencies } from '../engineering/shaft/lateral-frequencies'
 import { diagramStations, type DiagramStation } from '../engineering/shaft/section-forces'
+import { segmentAt, type ShaftSegment } from '../engineering/shaft/shaft-model'
 import { torsionalFrequencies } from '../engineering/shaft/torsional-frequencies'
 import type { LayoutDocument, LoadCase } from '../layout/layout-document'
 import { attempt } from './attempt'
@@ -11,14 +12,19 @@ import type { HubCalculation } from './hub-result'
 import type { LayoutResults, ShaftLoadCaseResult } from './layout-results'
 import { memoise } from './memoise'
 import { notchesOf, type Notch } from './notches'
-import { shaftCaseResult, type SeatPressure } from './shaft-case-result'
+import { shaftCaseResult } from './shaft-case-result'
 import { shaftInputs, shaftLoads, type ShaftInputs } from './shaft-inputs'
 
 /** A shaft ready for any load case: what depends on geometry only. */
 export interface PreparedShaft {
-  key: string
+  /** Different for every shaft that was prepared; stands for all its inputs in the keys of load cases. */
+  id: number
   beam: FactoredBeam
   stations: DiagramStation[]
+  /** Section under each station, on its side of a step. */
+  sections: ShaftSegment[]
+  /** Index of the hub over each station, −1 beside hubs; at a seat edge the side decides. */
+  hubOver: Int16Array
 }
 
 export interface ShaftCalculation {
@@ -35,17 +41,20 @@ const CURVE_POINTS = 40
 const LATERAL_COUNT = 3
 const TORSIONAL_COUNT = 3
 
+let lastPreparedId = 0
+
 const frequencyCache = memoise<{ lateralCriticalRpm: number[]; torsionalHz: number[] }>(20)
 const preparedCache = memoise<{ prepared: PreparedShaft | null; reason: string | null }>(20)
-const caseCache = memoise<{ result: ShaftLoadCaseResult | null; reason: string | null }>(200)
+const caseCache = memoise<{ result: ShaftLoadCaseResult | null; reason: string | null }>(60)
 
 export function calculateShaft(document: LayoutDocument, hubs: readonly HubCalculation[]): ShaftCalculation {
   const inputs = shaftInputs(document)
   const notches = inputs.model ? notchesOf(document, inputs) : []
   const { prepared, reason } = prepareShaft(document, inputs)
   let failure = reason
-  const loadCases = document.loadCases.map((loadCase) => {
-    const solved = prepared && solveCase(document, loadCase, inputs, hubs, notches, prepared)
+  const context = prepared && caseContext(document, inputs, hubs, notches, prepared)
+  const loadCases = document.loadCases.map((loadCase, index) => {
+    const solved = context && solveCase(context, loadCase, index)
     failure ??= solved?.reason ?? null
     return solved?.result ?? withoutBeam(document, loadCase, inputs)
   })
@@ -89,40 +98,82 @@ function prepareShaft(document: LayoutDocument, inputs: ShaftInputs) {
       ...partStations,
     ]
     const stations = diagramStations(jumps, lengthMm / 1e3 / CURVE_POINTS)
-    return { prepared: { key, beam: beam.value, stations }, reason: null }
+    const sections = stations.flatMap(
+      ({ station, side }) => segmentAt(model, besides(station, side), side) ?? [],
+    )
+    const hubOver = hubsOver(document, stations)
+    lastPreparedId += 1
+    return { prepared: { id: lastPreparedId, beam: beam.value, stations, sections, hubOver }, reason: null }
   })
 }
 
-function solveCase(
+/** A touch to one side, so that a step or an edge at the station itself is on the other. */
+const besides = (station: number, side: 'left' | 'right') =>
+  side === 'left' ? station - 1e-9 : station + 1e-9
+
+function hubsOver(document: LayoutDocument, stations: readonly DiagramStation[]): Int16Array {
+  return Int16Array.from(stations, ({ station, side }) => {
+    const placeMm = besides(station, side) * 1e3
+    return document.hubs.findIndex((hub) => placeMm > hub.stationMm && placeMm < hub.stationMm + hub.lengthMm)
+  })
+}
+
+/** What load cases of one shaft share, gathered once. */
+interface CaseContext {
+  document: LayoutDocument
+  inputs: ShaftInputs
+  hubs: readonly HubCalculation[]
+  notches: readonly Notch[]
+  prepared: PreparedShaft
+  bearings: { part: string; stationMm: number }[]
+  /** Everything above that the id of the prepared shaft does not stand for. */
+  key: string
+}
+
+function caseContext(
   document: LayoutDocument,
-  loadCase: LoadCase,
   inputs: ShaftInputs,
   hubs: readonly HubCalculation[],
   notches: readonly Notch[],
   prepared: PreparedShaft,
-) {
-  const { model } = inputs
-  const loads = shaftLoads(document, loadCase, inputs.lengthMm)
-  const pressures = seatPressures(document, loadCase, hubs)
-  const places = document.hubs.map((hub) => ({
-    part: hub.id,
-    stationMm:
-      loadCase.loads.find((load) => load.hub === hub.id)?.stationMm ?? hub.stationMm + hub.lengthMm / 2,
-  }))
+): CaseContext {
   const bearings = inputs.supporting.map(({ bearing }) => ({
     part: bearing.id,
     stationMm: bearing.stationMm,
   }))
+  const notchInputs = notches.flatMap((notch) => [
+    notch.stationMm,
+    notch.kind,
+    notch.part,
+    notch.diameterMm,
+    notch.boreMm,
+    notch.factors.bending,
+    notch.factors.torsion,
+    notch.endurance,
+  ])
+  const parts = [...bearings.map(({ part }) => part), ...document.hubs.map((hub) => hub.id)]
+  const key = JSON.stringify([prepared.id, inputs.locatingId, parts, notchInputs])
+  return { document, inputs, hubs, notches, prepared, bearings, key }
+}
+
+function solveCase(context: CaseContext, loadCase: LoadCase, caseIndex: number) {
+  const { document, inputs, prepared } = context
+  const { model } = inputs
+  const loads = shaftLoads(document, loadCase, inputs.lengthMm)
+  // at the most interference; hubs without numbers press with nothing
+  const pressures = context.hubs.map((hub) => hub.states[caseIndex]?.pressureMax ?? 0)
+  const firstLoads = new Map([...loadCase.loads].reverse().map((load) => [load.hub, load.stationMm]))
+  const places = document.hubs.map((hub) => ({
+    part: hub.id,
+    stationMm: firstLoads.get(hub.id) ?? hub.stationMm + hub.lengthMm / 2,
+  }))
   const key = JSON.stringify([
+    context.key,
     loadCase.id,
     loadCase.applicationFactor,
-    prepared.key,
-    loads,
+    loads.map((load): unknown[] => Object.values(load)),
     pressures,
-    notches,
-    places,
-    bearings,
-    inputs.locatingId,
+    places.map((place) => place.stationMm),
   ])
   return caseCache(key, () => {
     const solved = attempt(() =>
@@ -134,11 +185,12 @@ function solveCase(
             beam: prepared.beam,
             stations: prepared.stations,
             loads,
-            bearings,
+            bearings: context.bearings,
             locatingId: inputs.locatingId,
-            places: [...bearings, ...places],
-            pressures,
-            notches,
+            places: [...context.bearings, ...places],
+            pressures: pressureCourse(prepared, pressures),
+            sections: prepared.sections,
+            notches: context.notches,
           })
         : null,
     )
@@ -146,18 +198,9 @@ function solveCase(
   })
 }
 
-/** Pressure of each seat at its most interference in this load case. */
-function seatPressures(
-  document: LayoutDocument,
-  loadCase: LoadCase,
-  hubs: readonly HubCalculation[],
-): SeatPressure[] {
-  return document.hubs.flatMap((hub, index) => {
-    const state = hubs[index]?.states.find((one) => one.seatCase.id === loadCase.id)
-    return state
-      ? [{ startMm: hub.stationMm, endMm: hub.stationMm + hub.lengthMm, pressure: state.pressureMax }]
-      : []
-  })
+/** Pressure over each station from the pressure of each hub. */
+function pressureCourse({ hubOver }: PreparedShaft, ofHubs: readonly number[]): Float64Array {
+  return Float64Array.from(hubOver, (hub) => (hub < 0 ? 0 : (ofHubs[hub] ?? 0)))
 }
 
 /** What remains known when the beam cannot be solved: the torques. */

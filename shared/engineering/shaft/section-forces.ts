@@ -21,6 +21,9 @@ export interface SectionForces {
   bendingZ: Float64Array
 }
 
+/** Stations closer than a nanometre are one place. */
+const SAME_PLACE = 1e-9
+
 /**
  * Stations of the diagrams: every station named twice (left and right side), the rest between them once.
  *
@@ -40,7 +43,7 @@ export function diagramStations(jumps: readonly number[], largestStep: number): 
   let last: number | null = null
   for (const station of sorted) {
     if (last !== null) {
-      if (station - last < 1e-9) continue
+      if (station - last < SAME_PLACE) continue
       const parts = Math.min(200, Math.ceil((station - last) / largestStep))
       for (let part = 1; part < parts; part += 1)
         stations.push({ station: (last + ((station - last) * part) / parts) as Length, side: 'right' })
@@ -78,36 +81,36 @@ export function sectionForces(
     bendingY: new Float64Array(count),
     bendingZ: new Float64Array(count),
   }
-  const sum = { torque: 0, axial: 0, y: 0, z: 0, momentY: 0, momentZ: 0 }
   let next = 0
   let place = ordered[0]?.station ?? 0
-  // moments move along with the cut, so that far-away forces do not cancel in large products
-  const moveTo = (station: number) => {
-    sum.momentZ += sum.y * (station - place)
-    sum.momentY -= sum.z * (station - place)
-    place = station
-  }
-  stations.forEach(({ station, side }, index) => {
-    for (let load = ordered[next]; load && isLeftOf(load.station, station, side); load = ordered[next]) {
-      moveTo(load.station)
-      sum.torque += load.torque
-      sum.axial += load.axialForce
-      sum.y += load.forceY
-      sum.z += load.forceZ
-      sum.momentZ -= load.momentZ
-      sum.momentY -= load.momentY
+  let torque = 0
+  let axial = 0
+  let y = 0
+  let z = 0
+  let momentY = 0
+  let momentZ = 0
+  for (let index = 0; index < count; index += 1) {
+    const { station, side } = stations[index] as DiagramStation
+    const reach = side === 'right' ? station + SAME_PLACE : station - SAME_PLACE
+    for (let load = ordered[next]; load && load.station <= reach; load = ordered[next]) {
+      // moments move along with the cut, so that far-away forces do not cancel in large products
+      momentZ += y * (load.station - place) - load.momentZ
+      momentY -= z * (load.station - place) + load.momentY
+      place = load.station
+      torque += load.torque
+      axial += load.axialForce
+      y += load.forceY
+      z += load.forceZ
       next += 1
     }
-    if (next > 0) moveTo(station)
-    forces.torque[index] = sum.torque
-    forces.axialForce[index] = -sum.axial
-    forces.shearY[index] = sum.y
-    forces.shearZ[index] = sum.z
-    forces.bendingZ[index] = sum.momentZ
-    forces.bendingY[index] = sum.momentY
-  })
+    // left of the first load there is nothing to carry
+    const arm = next > 0 ? station - place : 0
+    forces.torque[index] = torque
+    forces.axialForce[index] = -axial
+    forces.shearY[index] = y
+    forces.shearZ[index] = z
+    forces.bendingZ[index] = momentZ + y * arm
+    forces.bendingY[index] = momentY - z * arm
+  }
   return forces
 }
-
-const isLeftOf = (load: number, station: number, side: 'left' | 'right') =>
-  side === 'right' ? load <= station + 1e-9 : load < station - 1e-9

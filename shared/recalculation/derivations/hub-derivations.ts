@@ -23,11 +23,11 @@ export function deriveHubQuantity(hub: HubCalculation, quantity: HubQuantity): D
   if (!seat || !rest) return missing(TITLES[quantity], '', result.notComputable.join('; '))
   switch (quantity) {
     case 'interferenceMin':
-      return interferenceDerivation(seat, 'min')
+      return interferenceDerivation(hub, seat, 'min')
     case 'interferenceMax':
-      return interferenceDerivation(seat, 'max')
+      return interferenceDerivation(hub, seat, 'max')
     case 'embeddingLoss':
-      return embeddingDerivation(seat)
+      return embeddingDerivation(hub, seat)
     case 'windowRequired':
       return windowDerivation(hub, seat, 'required')
     case 'windowPermissible':
@@ -67,8 +67,9 @@ const TITLES: Readonly<Record<HubQuantity, string>> = {
   effectiveLength: 'Length that carries',
 }
 
-function interferenceDerivation(seat: Seat, which: 'min' | 'max'): Derivation {
-  const value = toUm(seat.interference[which])
+function interferenceDerivation(hub: HubCalculation, seat: Seat, which: 'min' | 'max'): Derivation {
+  const { minUm, maxUm } = hub.result.interference
+  const value = which === 'min' ? minUm : maxUm
   const common = {
     title: which === 'min' ? TITLES.interferenceMin : TITLES.interferenceMax,
     symbol: which === 'min' ? 'd_min' : 'd_max',
@@ -80,7 +81,7 @@ function interferenceDerivation(seat: Seat, which: 'min' | 'max'): Derivation {
     return derivation({
       ...common,
       formula: [which === 'min' ? 'd_min = given' : 'd_max = given'],
-      inputs: [input(common.symbol, 'limit of the interference', value, 'µm', 'entered')],
+      inputs: [input(common.symbol, 'limit of the interference', value ?? 'not given', 'µm', 'entered')],
       validity: 'As entered.',
       sources: [],
     })
@@ -119,7 +120,7 @@ function interferenceDerivation(seat: Seat, which: 'min' | 'max'): Derivation {
   })
 }
 
-function embeddingDerivation(seat: Seat): Derivation {
+function embeddingDerivation(hub: HubCalculation, seat: Seat): Derivation {
   return derivation({
     title: TITLES.embeddingLoss,
     formula: ['Δd_e = 0.8 (Rz_A + Rz_I)'],
@@ -128,7 +129,7 @@ function embeddingDerivation(seat: Seat): Derivation {
       input('Rz_I', 'roughness of the seat', toUm(seat.shaftRoughness), 'µm', 'entered'),
     ],
     symbol: 'Δd_e',
-    value: toUm(seat.embedding),
+    value: hub.result.interference.embeddingLossUm,
     unit: 'µm',
     model: 'The peaks of each surface are flattened by 0.4 Rz on both sides of the diameter.',
     validity: 'Ground, turned or reamed metal, Rz below about 20 µm; less is lost when the hub is heated.',
