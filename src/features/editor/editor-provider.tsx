@@ -1,5 +1,5 @@
 /** What drawing, outline and toolbar have in common: the tool driver, the actions, the keyboard, the help. */
-import { type ReactNode, useEffect, useMemo, useState } from 'react'
+import { lazy, type ReactNode, Suspense, useEffect, useMemo, useState } from 'react'
 import { useLayoutSession } from '@/lib/layout-session-context'
 import { useLayoutStore } from '@/stores/layout-store'
 import { useSelectionStore } from '@/stores/selection-store'
@@ -7,9 +7,12 @@ import { createNudger } from './actions/nudge'
 import { useShortcuts } from './actions/use-shortcuts'
 import { BenchActionsContext, createBenchActions } from './bench-actions'
 import { createToolDriver } from './tool-driver'
-import { ShortcutsDialog } from './toolbar/shortcuts-dialog'
 import { partKind } from './tools/part'
 import { useViewStore } from './view-store'
+
+const ShortcutsDialog = lazy(async () => ({
+  default: (await import('./toolbar/shortcuts-dialog')).ShortcutsDialog,
+}))
 
 const MOST_SHARED_SELECTION = 50
 
@@ -49,7 +52,11 @@ export function EditorProvider({ children }: { children: ReactNode }) {
   return (
     <BenchActionsContext value={actions}>
       {children}
-      {isHelpOpen && <ShortcutsDialog onClose={() => setIsHelpOpen(false)} />}
+      {isHelpOpen && (
+        <Suspense fallback={null}>
+          <ShortcutsDialog onClose={() => setIsHelpOpen(false)} />
+        </Suspense>
+      )}
     </BenchActionsContext>
   )
 }

@@ -16,7 +16,7 @@ import { READING_TOOLS, type RunningTool, startTool } from './tools/tool-runner'
 import { useViewStore } from './view-store'
 
 export interface ToolDriver {
-  useTool: (id: ToolId) => void
+  takeUp: (id: ToolId) => void
   pointer: (type: 'down' | 'move' | 'up', pointer: ToolPointer) => void
   leave: () => void
   /** Escape. Answers whether a drag was in progress that it has put back. */
@@ -124,7 +124,7 @@ export function createToolDriver(session: LayoutSession): ToolDriver {
   }
 
   return {
-    useTool(id) {
+    takeUp(id) {
       const canEdit = useLayoutStore.getState().access?.canEdit ?? false
       if (tool.id === id || (!canEdit && !READING_TOOLS.includes(id))) return
       if (isPressed) putBack()

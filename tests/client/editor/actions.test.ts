@@ -19,7 +19,7 @@ function contextOf(session: FakeSession, more: Partial<ActionContext> = {}): Act
   return {
     session,
     driver: {
-      useTool: () => undefined,
+      takeUp: () => undefined,
       pointer: () => undefined,
       leave: () => undefined,
       cancel: () => false,

@@ -6,13 +6,13 @@ import { Drawing } from '@/features/editor/drawing'
 import { EndView } from '@/features/editor/end-view/end-view'
 import { Inspector } from '@/features/editor/inspector/inspector'
 import { Outline } from '@/features/editor/outline/outline'
-import { DerivationDialog } from '@/features/results/derivation-dialog'
 import { FindingsAnnouncer } from '@/features/results/findings-announcer'
 import { VerdictStrip } from '@/features/results/verdict-strip'
 import { useLayoutStore } from '@/stores/layout-store'
 import { BenchBar } from './bench-bar'
 import { BenchMessages } from './bench-messages'
 import { useBenchRegions } from './bench-regions'
+import { OpenDerivation } from './open-derivation'
 import { BenchTables, TABLE_TABS } from './bench-tables'
 import { RegionMenu } from './region-menu'
 import { SplitHandle } from './split-handle'
@@ -97,7 +97,7 @@ export function BenchPage({ layoutId }: { layoutId: string }) {
         )}
       </main>
       <FindingsAnnouncer />
-      <DerivationDialog />
+      <OpenDerivation />
     </div>
   )
 }

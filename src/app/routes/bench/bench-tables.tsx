@@ -1,13 +1,22 @@
 /** The tables under the drawing. The chosen one stands in the address, so that a link opens it. */
-import type { ReactNode } from 'react'
+import { lazy, type ReactNode, Suspense } from 'react'
 import { useSearchParams } from 'react-router'
 import { Tabs } from '@/components/tabs'
-import { AssemblyPlan } from '@/features/assembly-plan/assembly-plan'
 import { FitSchedule } from '@/features/fit-schedule/fit-schedule'
-import { LoadCasesPanel } from '@/features/load-cases/load-cases-panel'
 import { FindingsList } from '@/features/results/findings-list'
-import { ShaftSectionsPanel } from '@/features/shaft-sections/shaft-sections-panel'
 import { useResultsStore } from '@/stores/results-store'
+import { PageLoading } from '../../page-loading'
+
+// Tables that are not in sight at first come when they are opened.
+const AssemblyPlan = lazy(async () => ({
+  default: (await import('@/features/assembly-plan/assembly-plan')).AssemblyPlan,
+}))
+const LoadCasesPanel = lazy(async () => ({
+  default: (await import('@/features/load-cases/load-cases-panel')).LoadCasesPanel,
+}))
+const ShaftSectionsPanel = lazy(async () => ({
+  default: (await import('@/features/shaft-sections/shaft-sections-panel')).ShaftSectionsPanel,
+}))
 
 export interface TableTab {
   id: string
@@ -71,7 +80,7 @@ export function BenchTables({ tabs, panelClassName }: { tabs: readonly TableTab[
       }
       panelClassName={panelClassName}
     >
-      {shown.content}
+      <Suspense fallback={<PageLoading label="Loading the table" />}>{shown.content}</Suspense>
     </Tabs>
   )
 }

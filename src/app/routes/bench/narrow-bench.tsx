@@ -5,12 +5,12 @@ import { Diagrams } from '@/features/editor/diagrams/diagrams'
 import { Drawing } from '@/features/editor/drawing'
 import { EndView } from '@/features/editor/end-view/end-view'
 import { Inspector } from '@/features/editor/inspector/inspector'
-import { DerivationDialog } from '@/features/results/derivation-dialog'
 import { FindingsAnnouncer } from '@/features/results/findings-announcer'
 import { VerdictStrip } from '@/features/results/verdict-strip'
 import { useLayoutStore } from '@/stores/layout-store'
 import { BenchBar } from './bench-bar'
 import { BenchMessages } from './bench-messages'
+import { OpenDerivation } from './open-derivation'
 import { BenchTables, TABLE_TABS, type TableTab } from './bench-tables'
 
 export function NarrowBench({ layoutId }: { layoutId: string }) {
@@ -54,7 +54,7 @@ export function NarrowBench({ layoutId }: { layoutId: string }) {
         <BenchTables tabs={tabs} panelClassName="relative min-h-64 overflow-x-auto" />
       </main>
       <FindingsAnnouncer />
-      <DerivationDialog />
+      <OpenDerivation />
     </div>
   )
 }

@@ -28,5 +28,5 @@ export const TOOL_ACTIONS: readonly EditorAction[] = TOOLS.map(({ id, key, help 
   group: 'Tools',
   chords: [{ key }],
   isAvailable: ({ canEdit }) => canEdit || READING_TOOLS.includes(id),
-  perform: ({ driver }) => driver.useTool(id),
+  perform: ({ driver }) => driver.takeUp(id),
 }))

@@ -9,7 +9,7 @@ import { usePreferencesStore } from '@/stores/preferences-store'
 import { useSelectionStore } from '@/stores/selection-store'
 import { type PartState, stateOf } from '../part-states'
 import { bearingExtent, hubExtent } from '../tools/part'
-import { useViewStore } from '../view-store'
+import { drawingMargins, useViewStore } from '../view-store'
 import { drawTag, FONT } from './draw-dimension'
 import { Drawn, type Pen } from './drawn'
 import { LABEL_LINE_PX, type LabelWish, placeLabels } from './label-layout'
@@ -91,7 +91,11 @@ export const PartLabels = memo(function PartLabels({
           bottom: Infinity,
         }
       })
-      const frame = { topPx: RULER_HEIGHT_PX + 3, leftPx: 4, rightPx: widthPx - 4 }
+      const frame = {
+        topPx: RULER_HEIGHT_PX + 3,
+        leftPx: drawingMargins(widthPx, 0).left - 4,
+        rightPx: widthPx - 4,
+      }
       const placed = placeLabels(wishes, frame, bodies)
       pen.textAlign = 'center'
       pen.textBaseline = 'alphabetic'

@@ -1,5 +1,5 @@
 /** The shaft seen from one end: lobes and phase angles, directions of the loads, and both as a list. */
-import { useState } from 'react'
+import { useDeferredValue, useState } from 'react'
 import type { LayoutDocument } from '@shared/layout/layout-document'
 import { formatGiven, formatResult } from '@/lib/format-quantity'
 import { usePreferencesStore } from '@/stores/preferences-store'
@@ -10,7 +10,9 @@ import { forceMarks, phaseMarks, type ViewedFrom } from './end-view-geometry'
 
 const OTHER_END: Record<ViewedFrom, ViewedFrom> = { left: 'right', right: 'left' }
 
-export function EndView({ document }: { document: LayoutDocument }) {
+export function EndView({ document: newest }: { document: LayoutDocument }) {
+  // The drawing has the first call on a frame while something is dragged.
+  const document = useDeferredValue(newest)
   const [from, setFrom] = useState<ViewedFrom>('right')
   const units = usePreferencesStore((state) => state.units)
   const select = useSelectionStore((state) => state.select)

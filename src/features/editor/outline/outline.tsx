@@ -3,7 +3,7 @@
  * readers. Up and down walk and select, left and right shift the part, Enter opens the inspector,
  * Delete removes. It is always in the page; collapsed, it shows itself as soon as it has the focus.
  */
-import { type KeyboardEvent, type ReactNode, useRef, useState } from 'react'
+import { type KeyboardEvent, type ReactNode, useDeferredValue, useRef, useState } from 'react'
 import type { Operation } from '@shared/layout/operations'
 import { useLayoutSession } from '@/lib/layout-session-context'
 import { useLayoutStore } from '@/stores/layout-store'
@@ -32,7 +32,8 @@ export function Outline({
   const [currentId, setCurrentId] = useState<string | null>(null)
   const session = useLayoutSession()
   const { run } = useBenchActions()
-  const document = useLayoutStore((state) => state.visible)
+  // A drag redraws the drawing at once; the list may follow when there is time.
+  const document = useDeferredValue(useLayoutStore((state) => state.visible))
   const canEdit = useLayoutStore((state) => state.access?.canEdit ?? false)
   const selectedIds = useSelectionStore((state) => state.selectedIds)
   const words = useWordsContext(document)
