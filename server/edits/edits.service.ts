@@ -43,17 +43,15 @@ export function acceptEdit(
   }
   const judgement = judgeEdit(transaction, layout, author, edit, now)
   const result = storeJudgement(transaction, layout, judgement)
-  // Somebody without the right to edit leaves no trace in the database.
-  if (judgement.kind !== 'forbidden') {
-    const { editId, clientId, clientSeq } = edit
-    transaction.storeReceipt(layout.layoutId, {
-      editId,
-      clientId,
-      clientSeq,
-      userId: author.userId,
-      outcome: result.outcome,
-    })
-  }
+  // Refusals too: an edit that its author was told is refused must not be accepted when a copy of it comes late.
+  const { editId, clientId, clientSeq } = edit
+  transaction.storeReceipt(layout.layoutId, {
+    editId,
+    clientId,
+    clientSeq,
+    userId: author.userId,
+    outcome: result.outcome,
+  })
   return result
 }
 
@@ -97,7 +95,7 @@ export function refusal(reason: RejectReason, message: string): SubmitOutcome {
 
 type Judgement =
   | { kind: 'store'; outcome: 'accepted' | 'adjusted'; edit: AcceptedEdit; document: LayoutDocument }
-  | { kind: 'answer' | 'forbidden'; outcome: SubmitOutcome }
+  | { kind: 'answer'; outcome: SubmitOutcome }
 
 function judgeEdit(
   transaction: EditTransaction,
@@ -109,7 +107,7 @@ function judgeEdit(
   switch (decide(author, 'layout:edit', { workspaceId: layout.workspaceId, status: layout.status })) {
     case 'not-found':
     case 'forbidden':
-      return { kind: 'forbidden', outcome: refusal('forbidden', 'Your role does not allow editing.') }
+      return { kind: 'answer', outcome: refusal('forbidden', 'Your role does not allow editing.') }
     case 'frozen':
       return {
         kind: 'answer',

@@ -40,6 +40,29 @@ describe('a committed edit', () => {
     expect(await memory.load(LAYOUT)).toEqual([])
   })
 
+  it('C2 is not overtaken by a later one that was kept sooner', async () => {
+    const world = memoryWorld()
+    const memory = createMemoryOutbox()
+    const kept: (() => void)[] = []
+    const uneven: Outbox = {
+      ...memory,
+      put: (record) =>
+        new Promise((resolve) => {
+          kept.push(() => resolve(memory.put(record)))
+        }),
+    }
+    const dina = await world.open('Dina', 'designer', { outbox: uneven })
+    dina.set('A', 'stationMm', 12)
+    dina.set('A', 'stationMm', 13)
+    kept[1]?.()
+    await world.flush()
+    expect(dina.line.submitted).toEqual([])
+    kept[0]?.()
+    await world.flush()
+    expect(dina.line.submitted.map(({ clientSeq }) => clientSeq)).toEqual([1, 2])
+    expect(world.layout.document.hubs[0]?.stationMm).toBe(13)
+  })
+
   it('C3 is sent again after a break, in order and under the same number', async () => {
     const world = memoryWorld()
     const dina = await world.open('Dina')

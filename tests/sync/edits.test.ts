@@ -135,13 +135,17 @@ describe('outcomes', () => {
     expect(world.layout.revision).toBe(1)
   })
 
-  it('E9 an edit without the right to edit is forbidden and leaves no trace', async () => {
+  it('E9 an edit without the right to edit is forbidden, and stays so when the right comes later', async () => {
     const world = memoryWorld()
     for (const role of ['viewer', 'shop'] as const) {
       const reader = await someoneIn(world, role, role)
       expect(await reader.move(12)).toMatchObject({ outcome: 'rejected', reason: 'forbidden' })
     }
-    expect(world.storage.receipts(LAYOUT)).toEqual([])
+    expect(world.layout.revision).toBe(0)
+    const vera = await someoneIn(world, 'Vera', 'viewer')
+    const refused = await vera.move(12, { editId: 'edit-v', clientSeq: 1 })
+    world.rooms.changePrincipal(vera.connectionId, principalOf('Vera', 'designer'))
+    expect(await vera.move(12, { editId: 'edit-v', clientSeq: 1 })).toEqual(refused)
     for (const role of ['designer', 'manager', 'admin'] as const) {
       const editor = await someoneIn(world, role, role)
       expect(await editor.move(20 + role.length)).toMatchObject({ outcome: 'accepted' })

@@ -38,16 +38,14 @@ export async function sqliteFixture(
       tx.run(tx.kysely.insertInto('user').values(user))
     }
     tx.run(
-      tx.kysely
-        .insertInto('organization')
-        .values({
-          id: layout.workspaceId,
-          name: 'Test',
-          slug: 'test',
-          logo: null,
-          created_at: at,
-          metadata: null,
-        }),
+      tx.kysely.insertInto('organization').values({
+        id: layout.workspaceId,
+        name: 'Test',
+        slug: 'test',
+        logo: null,
+        created_at: at,
+        metadata: null,
+      }),
     )
     const author = `user-${userNames[0]?.toLowerCase() ?? ''}`
     tx.run(
