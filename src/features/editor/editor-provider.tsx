@@ -1,11 +1,12 @@
 /** What drawing, outline and toolbar have in common: the tool driver, the actions, the keyboard, the help. */
 import { lazy, type ReactNode, Suspense, useEffect, useMemo, useState } from 'react'
+import { showToast } from '@/components/toast-store'
 import { useLayoutSession } from '@/lib/layout-session-context'
 import { useLayoutStore } from '@/stores/layout-store'
 import { useSelectionStore } from '@/stores/selection-store'
 import { createNudger } from './actions/nudge'
 import { useShortcuts } from './actions/use-shortcuts'
-import { BenchActionsContext, createBenchActions } from './bench-actions'
+import { type BenchActions, BenchActionsContext, createBenchActions } from './bench-actions'
 import { createToolDriver } from './tool-driver'
 import { partKind } from './tools/part'
 import { useViewStore } from './view-store'
@@ -28,6 +29,7 @@ export function EditorProvider({ children }: { children: ReactNode }) {
   )
   useShortcuts(actions.context, actions.nudger)
   useSelectionUpkeep()
+  useDropWhenReadOnly(actions)
 
   // The next layout starts afresh. Children have measured themselves by now, so nothing is reset on opening.
   useEffect(
@@ -61,7 +63,7 @@ export function EditorProvider({ children }: { children: ReactNode }) {
   )
 }
 
-/** A part that somebody else removed is not selected any more; losing the right to edit puts a drag back. */
+/** A part that somebody else removed is not selected any more. */
 function useSelectionUpkeep(): void {
   useEffect(
     () =>
@@ -73,5 +75,22 @@ function useSelectionUpkeep(): void {
         if (still.length < selectedIds.length) select(still)
       }),
     [],
+  )
+}
+
+/** Who may no longer edit, because of a freeze or of another role, drops what is in hand and hears of it. */
+function useDropWhenReadOnly({ driver, nudger }: BenchActions): void {
+  useEffect(
+    () =>
+      useLayoutStore.subscribe((state, previous) => {
+        if (state.access?.canEdit !== false || previous.access?.canEdit !== true) return
+        const wasNudging = nudger.cancel()
+        const wasDragging = driver.cancel()
+        driver.takeUp('select')
+        if (wasNudging || wasDragging) {
+          showToast('This layout can no longer be changed, so what you were moving was put back.', 'straw')
+        }
+      }),
+    [driver, nudger],
   )
 }

@@ -34,7 +34,7 @@ export function BenchPage({ layoutId }: { layoutId: string }) {
 
   if (!document) return null
   return (
-    <div className="flex h-dvh flex-col overflow-hidden">
+    <div className="flex h-dvh flex-col overflow-hidden [body:has([data-offline-banner])_&]:h-[calc(100dvh-2rem)]">
       <BenchBar layoutId={layoutId} />
       <BenchMessages layoutId={layoutId} />
       <main className="flex min-h-0 flex-1 flex-col">
