@@ -106,7 +106,7 @@ function numberFreedoms({ mesh }: ContactSystem, bonds: SeatBonds): { freedom: I
  * Model: a closed pair shares its radial freedom, a stuck pair the axial one as well, so that contact costs no
  * extra equations and the matrix stays positive definite.
  * @param system [SI] from `prepareContact`
- * @param bonds which seat nodes are open or stuck
+ * @param bonds [-] which seat nodes are open or stuck
  * @returns [SI] the factor, for any interference, temperature and speed
  * @throws EngineeringInputError `numericallySingular`
  *
@@ -178,7 +178,7 @@ function visitLoads(
  *
  * Model: linear elasticity; any state with the same bonds is a superposition of these.
  * @param system [SI] from `prepareContact`
- * @param factor from `factoriseContact`
+ * @param factor [N/m] from `factoriseContact`
  * @returns [m per unit load] equation i of load k at i · count + k
  * @throws nothing
  *

@@ -10,6 +10,7 @@ export interface RingElement {
   spin: Float64Array
 }
 
+/** Zeroed matrices of one element, to be filled by `ringElement`. */
 export function emptyRingElement(): RingElement {
   return { stiffness: new Float64Array(64), thermal: new Float64Array(8), spin: new Float64Array(8) }
 }

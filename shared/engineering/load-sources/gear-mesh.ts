@@ -48,7 +48,7 @@ export type Hand = 'right' | 'left'
  * @param gear.pitchDiameter [m] operating pitch diameter, > 0
  * @param gear.normalPressureAngle [rad] 0 to below π/2
  * @param gear.helixAngle [rad] 0 to below π/2
- * @param gear.hand hand of the helix of this gear, of no effect when β = 0
+ * @param gear.hand [-] hand of the helix of this gear, of no effect when β = 0
  * @returns [N] tangential (sign of the torque), radial (towards the centre, ≥ 0), axial (towards +x)
  * @throws EngineeringInputError `notPositive`, `notFinite`, `outOfRange`
  *
@@ -85,7 +85,7 @@ export function helicalToothForces(gear: {
  * @param gear.meanDiameter [m] pitch diameter at the middle of the face, > 0
  * @param gear.pressureAngle [rad] 0 to below π/2
  * @param gear.pitchConeAngle [rad] of this gear, 0 to below π/2
- * @param gear.largeEnd side of the gear's large end
+ * @param gear.largeEnd [-] side of the gear's large end
  * @returns [N] tangential (sign of the torque), radial (towards the centre, ≥ 0), axial (towards +x)
  * @throws EngineeringInputError `notPositive`, `notFinite`, `outOfRange`
  *

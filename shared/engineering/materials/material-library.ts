@@ -43,7 +43,7 @@ const calculationValues: ReadonlyMap<LibraryMaterial, Material> = new Map(
  * @returns [-] the entry with provenance of each value, or undefined when the library has none
  *
  * Validity: strengths hold for the section named in the entry; replace them by the certificate for release.
- * Source: din-7190-1 expansion and heating limits; each value names its own
+ * Source: din-7190-1 expansion and heating limits
  * Example: `42CrMo4-QT` has a yield strength of 650 MPa over 40 to 100 mm (EN 10083)
  */
 export function findLibraryMaterial(id: string): LibraryMaterial | undefined {
@@ -59,7 +59,7 @@ export function findLibraryMaterial(id: string): LibraryMaterial | undefined {
  * @throws EngineeringInputError `unknownMaterial`
  *
  * Validity: strengths hold for the section named in the entry; replace them by the certificate for release.
- * Source: din-7190-1 expansion and heating limits; each value names its own
+ * Source: din-7190-1 expansion and heating limits
  * Example: `C45E-N` may be heated to 350 °C for joining (from memory)
  */
 export function libraryMaterial(id: string): Material {

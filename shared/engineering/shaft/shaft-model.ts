@@ -46,6 +46,7 @@ export interface CarriedMass {
   polarInertia: MomentOfInertia
 }
 
+/** Station of the right end: the length of the shaft. */
 export function shaftLength(model: ShaftModel): number {
   return model.segments.at(-1)?.end ?? 0
 }
