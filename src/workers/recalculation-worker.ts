@@ -1,7 +1,8 @@
 /** Runs the calculation off the main thread, so that dragging stays smooth. No logic of its own. */
-import { deriveQuantity } from '@shared/recalculation/derive-quantity'
 import { recalculateLayout } from '@shared/recalculation/recalculate-layout'
 import type { RecalculationReply, RecalculationRequest } from '@shared/recalculation/worker-messages'
+
+type DeriveRequest = Extract<RecalculationRequest, { kind: 'derive' }>
 
 const reply = (message: RecalculationReply) => self.postMessage(message)
 
@@ -9,18 +10,23 @@ const words = (error: unknown) => (error instanceof Error ? error.message : Stri
 
 self.onmessage = (event: MessageEvent<RecalculationRequest>) => {
   const request = event.data
-  if (request.kind === 'recalculate') {
-    try {
-      reply({ kind: 'results', runId: request.runId, results: recalculateLayout(request.document) })
-    } catch (error) {
-      reply({ kind: 'notCalculated', runId: request.runId, message: words(error) })
-    }
+  if (request.kind === 'derive') {
+    void derive(request)
     return
   }
   try {
-    const derivation = deriveQuantity(request.document, request.reference)
-    reply({ kind: 'derivation', requestId: request.requestId, derivation })
+    reply({ kind: 'results', runId: request.runId, results: recalculateLayout(request.document) })
   } catch (error) {
-    reply({ kind: 'notDerived', requestId: request.requestId, message: words(error) })
+    reply({ kind: 'notCalculated', runId: request.runId, message: words(error) })
+  }
+}
+
+/** The formula texts are fetched with the first number that somebody opens. */
+async function derive({ requestId, document, reference }: DeriveRequest) {
+  try {
+    const { deriveQuantity } = await import('@shared/recalculation/derive-quantity')
+    reply({ kind: 'derivation', requestId, derivation: deriveQuantity(document, reference) })
+  } catch (error) {
+    reply({ kind: 'notDerived', requestId, message: words(error) })
   }
 }

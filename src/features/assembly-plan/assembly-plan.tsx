@@ -5,13 +5,8 @@ import { Cautions } from '@/drawings/cautions'
 import { useLayoutStore } from '@/stores/layout-store'
 import { usePreferencesStore } from '@/stores/preferences-store'
 import { useResultsStore } from '@/stores/results-store'
-import { findLibraryMaterial } from '@shared/engineering/materials/material-library'
-import type { Hub } from '@shared/layout/layout-document'
 import { AssemblySteps } from './assembly-steps'
 import { joiningCautions } from './joining-cautions'
-
-const isBrittle = ({ material }: Hub) =>
-  typeof material === 'string' ? (findLibraryMaterial(material)?.isBrittle ?? false) : material.brittle
 
 export function AssemblyPlan() {
   const layout = useLayoutStore((state) => state.visible)
@@ -54,7 +49,10 @@ export function AssemblyPlan() {
       <section aria-label="Cautions" className="max-w-4xl">
         <h3 className="text-[13px] font-bold text-plum">Cautions</h3>
         <ul className="mt-1 list-disc pl-5 text-[13px]">
-          {joiningCautions(layout.hubs, layout.hubs.some(isBrittle)).map((caution) => (
+          {joiningCautions(
+            layout.hubs,
+            results.hubs.some(({ isBrittle }) => isBrittle),
+          ).map((caution) => (
             <li key={caution}>{caution}</li>
           ))}
         </ul>

@@ -1,8 +1,7 @@
 /** Texts and verdicts of the calculated cells, for the table and the phone list alike. */
 import { formatResult, formatResultPair, formatSafety, NOT_COMPUTED } from '@/lib/format-quantity'
 import type { UnitSystem } from '@/lib/quantity-units'
-import { findLibraryMaterial } from '@shared/engineering/materials/material-library'
-import type { Hub, LayoutDocument } from '@shared/layout/layout-document'
+import type { LayoutDocument } from '@shared/layout/layout-document'
 import type { HubCaseQuantity } from '@shared/recalculation/derivation'
 import type { ScheduleRow } from './schedule-rows'
 
@@ -14,15 +13,12 @@ export interface SafetyCell {
   text: string
 }
 
-const isBrittle = ({ material }: Hub) =>
-  typeof material === 'string' ? (findLibraryMaterial(material)?.isBrittle ?? false) : material.brittle
-
 /** Torque, axial, combined slip and hub stress, each against its own limit in the case shown. */
-export function safetyCells({ hub, shown }: ScheduleRow, layout: LayoutDocument): SafetyCell[] {
+export function safetyCells({ result, shown }: ScheduleRow, layout: LayoutDocument): SafetyCell[] {
   const own = layout.loadCases.find(({ id }) => id === shown?.loadCase)?.criteria
   const criteria = { ...layout.criteria, ...own }
   const slipLimit = shown?.slipSafetyLimit ?? null
-  const hubLimit = isBrittle(hub) ? criteria.brittleSafety : criteria.hubYieldSafety
+  const hubLimit = result?.isBrittle === true ? criteria.brittleSafety : criteria.hubYieldSafety
   const cell = (
     quantity: HubCaseQuantity,
     label: string,

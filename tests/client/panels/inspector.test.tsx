@@ -7,7 +7,7 @@ import { useDerivationStore } from '@/stores/derivation-store'
 import { useLayoutStore } from '@/stores/layout-store'
 import { usePreferencesStore } from '@/stores/preferences-store'
 import { useSelectionStore } from '@/stores/selection-store'
-import { renderPanel } from './support/panel-bench'
+import { reducerShaft, renderPanel } from './support/panel-bench'
 
 const field = (name: string) => screen.getByRole<HTMLInputElement>('textbox', { name })
 const hub = (bench: ReturnType<typeof renderPanel>, id: string) =>
@@ -195,11 +195,25 @@ describe('the fit of a hub', () => {
   })
 })
 
+describe('a layout without load cases', () => {
+  it('still shows the stresses of the fit at rest', () => {
+    const layout = reducerShaft()
+    useSelectionStore.getState().select(['A'])
+    renderPanel(<Inspector />, { document: { ...layout, loadCases: [] } })
+    expect(screen.getByText('Hub bore, equivalent, at rest')).toBeDefined()
+    expect(screen.queryByText('Combined slip safety')).toBeNull()
+  })
+})
+
 describe('other properties', () => {
   it('sets both holding coefficients from a named pairing in one edit', async () => {
     const user = userEvent.setup()
     const bench = inspect('A')
-    await user.selectOptions(screen.getByRole('combobox', { name: 'Holding, like' }), 'ss-shrink-degreased')
+    await user.click(screen.getByText('Take it from a known pairing'))
+    await user.selectOptions(
+      await screen.findByRole('combobox', { name: 'Holding, like' }),
+      'ss-shrink-degreased',
+    )
     expect(bench.commits).toHaveLength(1)
     expect(hub(bench, 'A')?.friction).toMatchObject({ circumferential: 0.2, axial: 0.2, pressing: 0.12 })
   })
@@ -207,9 +221,21 @@ describe('other properties', () => {
   it('replaces one value of a material of its own and keeps the rest', async () => {
     const user = userEvent.setup()
     const bench = inspect('A')
+    await user.click(screen.getByText(/^31CrMoV9-N, yield 800/))
+    await screen.findByRole('textbox', { name: 'Yield strength' })
     await user.clear(field('Yield strength'))
     await user.type(field('Yield strength'), '750{Enter}')
     expect(hub(bench, 'A')?.material).toMatchObject({ yieldMPa: 750, tensileMPa: 1000 })
+  })
+
+  it('takes a material from the library, and starts own values from it', async () => {
+    const user = userEvent.setup()
+    const bench = inspect('A')
+    await user.click(screen.getByText(/^31CrMoV9-N, yield 800/))
+    await user.selectOptions(await screen.findByRole('combobox', { name: 'Material' }), '42CrMo4-QT-100')
+    expect(hub(bench, 'A')?.material).toBe('42CrMo4-QT-100')
+    await user.selectOptions(screen.getByRole('combobox', { name: 'Material' }), 'own-values')
+    expect(hub(bench, 'A')?.material).toMatchObject({ name: '42CrMo4-QT-100', yieldMPa: 650, brittle: false })
   })
 
   it('gives a value to all selected hubs', async () => {

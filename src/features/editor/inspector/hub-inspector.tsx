@@ -14,10 +14,12 @@ import { EditingNow } from './editing-now'
 import { FitFields } from './fit-fields'
 import { FrictionFields } from './friction-fields'
 import { HubDimensionFields, HubOtherFields } from './hub-fields'
-import { FitResults, GripResults, JoiningResults, StressResults } from './hub-results'
+import { FitResults, GripResults, JoiningResults } from './hub-results'
 import { Group } from './inspector-parts'
 import { JoiningFields } from './joining-fields'
-import { MaterialFields } from './material-fields'
+import { MaterialFields, Unfolding } from './lazy-fields'
+import { materialWords } from './material-words'
+import { RestStress, ServiceStress } from './stress-results'
 import { LayoutQuantityField } from '@/fields/layout-quantity-field'
 
 interface HubInspectorProps {
@@ -84,21 +86,26 @@ export function HubInspector({ hub, layout, units }: HubInspectorProps) {
         </p>
       )}
       {result !== null && shown !== null && (
-        <>
-          <Group title="Grip, at the loosest" note={loadCase && `case “${loadCase.name}”`}>
-            <GripResults result={result} shown={shown} units={units} />
-          </Group>
-          <Group title="Stress, at the tightest" note={loadCase && `case “${loadCase.name}”`}>
-            <StressResults hub={hub} result={result} shown={shown} criteria={criteria} units={units} />
-          </Group>
-        </>
+        <Group title="Grip, at the loosest" note={loadCase && `case “${loadCase.name}”`}>
+          <GripResults result={result} shown={shown} units={units} />
+        </Group>
+      )}
+      {result !== null && result.verdict !== 'notComputable' && (
+        <Group title="Stress, at the tightest" note={loadCase && `case “${loadCase.name}”`}>
+          {shown !== null && (
+            <ServiceStress result={result} shown={shown} criteria={criteria} units={units} />
+          )}
+          <RestStress result={result} criteria={layout.criteria} units={units} />
+        </Group>
       )}
       <Group title="Assembly">
         {result !== null && <JoiningResults hub={hub} result={result} units={units} />}
         <JoiningFields hubs={[hub]} />
       </Group>
       <Group title="Material and surface">
-        <MaterialFields address={hubAddress([hub], 'material')} material={hub.material} units={units} />
+        <Unfolding summary={materialWords(hub.material, units)}>
+          <MaterialFields address={hubAddress([hub], 'material')} material={hub.material} units={units} />
+        </Unfolding>
         <div className="mt-1.5">
           <LayoutQuantityField
             label="Bore roughness Rz"

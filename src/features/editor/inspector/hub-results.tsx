@@ -1,31 +1,16 @@
 /** The calculated numbers of one hub, grouped the way one judges a fit. */
 import { formatResult, formatResultPair } from '@/lib/format-quantity'
 import type { UnitSystem } from '@/lib/quantity-units'
-import { useResultsStore } from '@/stores/results-store'
-import { extreme } from '@/stores/shown-load-case'
-import { findLibraryMaterial } from '@shared/engineering/materials/material-library'
-import type { Criteria, Hub } from '@shared/layout/layout-document'
-import type { HubCaseQuantity, HubQuantity, QuantityReference } from '@shared/recalculation/derivation'
+import type { Hub } from '@shared/layout/layout-document'
 import type { HubLoadCaseResult, HubResult } from '@shared/recalculation/layout-results'
 import { ResultRow } from './inspector-parts'
+import { inCase, ofHub } from './result-references'
 
 interface Shown {
   result: HubResult
   shown: HubLoadCaseResult
   units: UnitSystem
 }
-
-const ofHub = (hub: string, quantity: HubQuantity): QuantityReference => ({ kind: 'hub', hub, quantity })
-const inCase = (
-  hub: string,
-  { loadCase }: HubLoadCaseResult,
-  quantity: HubCaseQuantity,
-): QuantityReference => ({
-  kind: 'hubCase',
-  hub,
-  loadCase,
-  quantity,
-})
 
 export function FitResults({
   result,
@@ -112,108 +97,6 @@ export function GripResults({ result, shown, units }: Shown) {
         name="combined slip safety"
         value=""
         safety={{ value: shown.slipSafety, limit, reference: inCase(id, shown, 'slipSafety') }}
-      />
-    </>
-  )
-}
-
-export function StressResults({
-  hub,
-  result,
-  shown,
-  criteria,
-  units,
-}: Shown & { hub: Hub; criteria: Criteria }) {
-  const { id, atRest } = result
-  const isBrittle =
-    typeof hub.material === 'string'
-      ? (findLibraryMaterial(hub.material)?.isBrittle ?? false)
-      : hub.material.brittle
-  const hubLimit = isBrittle ? criteria.brittleSafety : criteria.hubYieldSafety
-  const notches = useResultsStore(
-    (state) => state.results?.shaft.loadCases.find(({ loadCase }) => loadCase === shown.loadCase)?.notches,
-  )
-  const edge = extreme(
-    notches?.filter(({ part, kind }) => part === id && kind === 'seatEdge') ?? [],
-    ({ fatigueSafety }) => fatigueSafety,
-    'least',
-  )
-  const stress = (value: number | null) => formatResult(value, 'stress', units).text
-  return (
-    <>
-      <ResultRow
-        label="Interface pressure"
-        value={stress(shown.pressureMaxMPa)}
-        reference={inCase(id, shown, 'pressureMax')}
-      />
-      <ResultRow
-        label="Hub bore, hoop"
-        value={stress(shown.hubHoopMaxMPa)}
-        reference={inCase(id, shown, 'hubHoopMax')}
-      />
-      <ResultRow
-        label={isBrittle ? 'Hub bore, brittle' : 'Hub bore, equivalent'}
-        value={stress(shown.hubEquivalentMaxMPa)}
-        reference={inCase(id, shown, 'hubEquivalentMax')}
-        safety={{
-          value: shown.hubYieldSafety,
-          limit: hubLimit,
-          reference: inCase(id, shown, 'hubYieldSafety'),
-        }}
-      />
-      <ResultRow
-        label="Hub bore, at rest and 20 °C"
-        value={stress(atRest.hubEquivalentMaxMPa)}
-        reference={ofHub(id, 'hubEquivalentAtRest')}
-        safety={{
-          value: atRest.hubYieldSafety,
-          limit: hubLimit,
-          reference: ofHub(id, 'hubYieldSafetyAtRest'),
-        }}
-      />
-      <ResultRow
-        label="Shaft under the seat"
-        value={stress(shown.shaftEquivalentMaxMPa)}
-        reference={inCase(id, shown, 'shaftEquivalentMax')}
-        safety={{
-          value: shown.shaftYieldSafety,
-          limit: criteria.shaftYieldSafety,
-          reference: inCase(id, shown, 'shaftYieldSafety'),
-        }}
-      />
-      {edge !== null && (
-        <ResultRow
-          label={
-            <>
-              Shaft at seat edge, fatigue, K<sub>f</sub> {edge.fatigueNotchFactor.toFixed(1)}
-            </>
-          }
-          name="shaft fatigue at the seat edge"
-          value=""
-          safety={{
-            value: edge.fatigueSafety,
-            limit: criteria.fatigueSafety,
-            reference: {
-              kind: 'shaftCase',
-              loadCase: shown.loadCase,
-              quantity: 'fatigueSafety',
-              stationMm: edge.stationMm,
-            },
-          }}
-        />
-      )}
-      <ResultRow
-        label="Outer diameter grows by"
-        value={
-          formatResultPair(
-            result.outerDiameterGrowthUm.min,
-            result.outerDiameterGrowthUm.max,
-            'interference',
-            units,
-            ' … ',
-          ).text
-        }
-        reference={ofHub(id, 'outerDiameterGrowth')}
       />
     </>
   )

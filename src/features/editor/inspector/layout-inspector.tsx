@@ -9,7 +9,8 @@ import type { LayoutDocument } from '@shared/layout/layout-document'
 import { totalLengthMm } from '@shared/layout/shaft-geometry'
 import { EditingNow } from './editing-now'
 import { FieldGrid, Group } from './inspector-parts'
-import { MaterialFields } from './material-fields'
+import { MaterialFields, Unfolding } from './lazy-fields'
+import { materialWords } from './material-words'
 
 /** Nothing selected: the layout itself. */
 export function LayoutInspector({ layout, units }: { layout: LayoutDocument; units: UnitSystem }) {
@@ -48,16 +49,18 @@ export function LayoutInspector({ layout, units }: { layout: LayoutDocument; uni
       </header>
       <Group title="Shaft material">
         <EditingNow partKey="shaft:" />
-        <MaterialFields
-          label="Material of the shaft"
-          units={units}
-          material={layout.shaft.material}
-          address={{
-            label: 'Change the shaft material',
-            field: 'material',
-            targets: [{ target: { kind: 'shaft' }, value: layout.shaft.material }],
-          }}
-        />
+        <Unfolding summary={materialWords(layout.shaft.material, units)}>
+          <MaterialFields
+            label="Material of the shaft"
+            units={units}
+            material={layout.shaft.material}
+            address={{
+              label: 'Change the shaft material',
+              field: 'material',
+              targets: [{ target: { kind: 'shaft' }, value: layout.shaft.material }],
+            }}
+          />
+        </Unfolding>
       </Group>
       <Group title="Acceptance criteria" note="least or most allowed">
         <FieldGrid>

@@ -6,7 +6,8 @@ import { BearingFields } from './bearing-inspector'
 import { FrictionFields } from './friction-fields'
 import { FieldGrid, Group } from './inspector-parts'
 import { JoiningFields } from './joining-fields'
-import { MaterialFields } from './material-fields'
+import { MaterialFields, Unfolding } from './lazy-fields'
+import { materialWords } from './material-words'
 import { SectionFields } from './section-inspector'
 
 interface SeveralInspectorProps {
@@ -65,11 +66,15 @@ export function SeveralInspector({ hubs, bearings, sections, layout, units }: Se
                 max={1_000}
               />
             </FieldGrid>
-            <MaterialFields
-              address={hubAddress(hubs, 'material')}
-              material={firstHub.material}
-              units={units}
-            />
+            <Unfolding
+              summary={`Material: ${materialWords(firstHub.material, units)}${hubs.length > 1 ? ' …' : ''}`}
+            >
+              <MaterialFields
+                address={hubAddress(hubs, 'material')}
+                material={firstHub.material}
+                units={units}
+              />
+            </Unfolding>
           </Group>
           <Group title="Assembly">
             <JoiningFields hubs={hubs} />
