@@ -1,6 +1,5 @@
 import { BrowserRouter } from 'react-router'
 import { ErrorBoundary } from './error-boundary'
-import { OfflineBanner } from './offline-banner'
 import { Router } from './router'
 import { useTheme } from './use-theme'
 
@@ -9,7 +8,6 @@ export function App() {
   return (
     <ErrorBoundary>
       <BrowserRouter>
-        <OfflineBanner />
         <Router />
       </BrowserRouter>
     </ErrorBoundary>

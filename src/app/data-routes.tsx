@@ -11,6 +11,7 @@ import { PageFrame } from './frames/page-frame'
 import { SignedInFrame } from './frames/signed-in-frame'
 import { WorkspaceFrame } from './frames/workspace-frame'
 import { NotFound } from './not-found'
+import { OfflineBanner } from './offline-banner'
 import { PageLoading } from './page-loading'
 import HomeRoute from './routes/home/home-route'
 
@@ -26,6 +27,7 @@ const ReleaseRoute = lazy(() => import('./routes/releases/release-route'))
 export default function DataRoutes() {
   return (
     <QueryClientProvider client={queryClient}>
+      <OfflineBanner />
       <Suspense fallback={<PageLoading />}>
         <Routes>
           <Route element={<BareFrame />}>
