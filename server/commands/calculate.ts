@@ -1,16 +1,19 @@
 /**
  * `npm run --silent calculate -- layout.json` (or `-` for standard input) prints the results of a
- * layout file as one JSON object. Exit status 0: nothing fails; 3: some finding fails; 2: the input
+ * layout file as one JSON object; with `--contact` the contact solution of the whole shaft stands
+ * beside them under `contact`. Exit status 0: nothing fails; 3: some finding fails; 2: the input
  * is refused, each problem with its path on standard error and nothing on standard output.
  */
 import { readFileSync } from 'node:fs'
 import { parseLayoutFile, type LayoutFileProblem } from '@shared/layout/layout-file'
+import { calculateContact } from '@shared/recalculation/contact/calculate-contact'
 import { recalculateLayout } from '@shared/recalculation/recalculate-layout'
 
 const NOTHING_FAILS = 0
 const REFUSED = 2
 const SOMETHING_FAILS = 3
 const STANDARD_INPUT = 0
+const CONTACT_OPTION = '--contact'
 
 type Input = { text: string; problem: null } | { text: null; problem: string }
 
@@ -50,7 +53,9 @@ function refuse(problems: readonly string[]): number {
 
 const inWords = ({ path, message }: LayoutFileProblem) => (path === '' ? message : `${path}: ${message}`)
 
-function calculate(source: string | undefined): number {
+function calculate(words: readonly string[]): number {
+  const withContact = words.includes(CONTACT_OPTION)
+  const [source] = words.filter((word) => word !== CONTACT_OPTION)
   const input = readInput(source)
   if (input.problem !== null) return refuse([input.problem])
   const json = parseJson(input.text)
@@ -58,9 +63,10 @@ function calculate(source: string | undefined): number {
   const parsed = parseLayoutFile(json.content)
   if (!parsed.ok) return refuse(parsed.problems.map(inWords))
   const results = recalculateLayout(parsed.document)
-  process.stdout.write(`${JSON.stringify(results, null, 2)}\n`)
+  const printed = withContact ? { ...results, contact: calculateContact(parsed.document) } : results
+  process.stdout.write(`${JSON.stringify(printed, null, 2)}\n`)
   return results.verdict === 'fails' ? SOMETHING_FAILS : NOTHING_FAILS
 }
 
 // set, not exit(): output to a pipe may still be under way
-process.exitCode = calculate(process.argv[2])
+process.exitCode = calculate(process.argv.slice(2))
