@@ -209,6 +209,14 @@ describe('what lies under the pointer', () => {
     expect(at(98, 1, { selectedIds: ['A'], isTouch: true })).toMatchObject({ kind: 'handle' })
   })
 
+  it('is the part, not the handle of its outside, for a finger on a small part', () => {
+    expect(at(70, 40, { selectedIds: ['A'], isTouch: true })).toMatchObject({ kind: 'part' })
+    expect(at(70, 48, { selectedIds: ['A'], isTouch: true })).toMatchObject({
+      kind: 'handle',
+      face: 'outside',
+    })
+  })
+
   it('is the load under its hub', () => {
     expect(at(70, -50)).toEqual({ kind: 'load', loadCaseId: 'run', loadId: 'run-A', hubId: 'A' })
   })

@@ -140,8 +140,8 @@ export function LayoutCanvas({
                 <Group {...place}>
                   <PlacedParts document={document} states={states} isIncluded={(id) => moving.has(id)} />
                 </Group>
-                <Loads document={document} movingIds={display.movingIds} />
                 <BearingLabels document={document} states={states} />
+                <Loads document={document} movingIds={display.movingIds} />
                 <PartLabels document={document} states={states} />
                 <DimensionStrip document={document} />
                 <SelectionHandles document={document} hasHandles={canEdit && hasHandles} />

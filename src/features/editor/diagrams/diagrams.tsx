@@ -39,7 +39,7 @@ function useHeight() {
   return { target, heightPx }
 }
 
-const MIN_ROW_PX = 34
+const MIN_ROW_PX = 29
 
 export function Diagrams() {
   const { target, heightPx } = useHeight()

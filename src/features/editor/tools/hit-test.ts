@@ -21,6 +21,7 @@ export interface HitQuery {
 
 const HANDLE_RADIUS_PX = 9
 const TOUCH_RADIUS_PX = 20
+const OUTSIDE_DEPTH_PX = 3
 
 export interface HandlePlace {
   face: PartFace
@@ -49,8 +50,11 @@ function handleUnder(query: HitQuery): HitTarget | null {
   const reachMm = (query.isTouch ? TOUCH_RADIUS_PX : HANDLE_RADIUS_PX) * query.mmPerPx
   const distanceMm = ({ stationMm, heightMm }: HandlePlace) =>
     Math.hypot(stationMm - query.stationMm, heightMm - query.heightMm)
+  // The outside is taken from outside: within the part a finger means the part itself.
+  const isReachable = ({ face, heightMm }: HandlePlace) =>
+    face !== 'outside' || query.heightMm >= heightMm - OUTSIDE_DEPTH_PX * query.mmPerPx
   const nearest = handlePlaces(query.document, extent)
-    .filter((place) => distanceMm(place) <= reachMm)
+    .filter((place) => distanceMm(place) <= reachMm && isReachable(place))
     .sort((a, b) => distanceMm(a) - distanceMm(b))[0]
   return nearest ? { kind: 'handle', part: { kind: extent.kind, id: extent.id }, face: nearest.face } : null
 }
