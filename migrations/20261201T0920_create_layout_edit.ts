@@ -31,7 +31,7 @@ export async function up(db: Kysely<unknown>): Promise<void> {
       accepted_at TEXT NOT NULL,
       PRIMARY KEY (layout_id, revision),
       UNIQUE (layout_id, edit_id),
-      UNIQUE (layout_id, client_id, client_seq)
+      UNIQUE (layout_id, user_id, client_id, client_seq)
     ) WITHOUT ROWID`.execute(db)
 
   // For a re-sent edit: the same answer as the first time. Accepted edits find theirs in the log.
@@ -46,7 +46,7 @@ export async function up(db: Kysely<unknown>): Promise<void> {
       revision INTEGER,
       answer TEXT CHECK (answer IS NULL OR json_valid(answer)),
       answered_at TEXT NOT NULL,
-      PRIMARY KEY (layout_id, client_id, client_seq),
+      PRIMARY KEY (layout_id, user_id, client_id, client_seq),
       UNIQUE (layout_id, edit_id),
       CHECK ((outcome IN ('accepted', 'adjusted')) = (revision IS NOT NULL)),
       CHECK ((revision IS NULL) = (answer IS NOT NULL))

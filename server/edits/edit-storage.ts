@@ -20,13 +20,14 @@ export interface StoredLayout {
 
 export interface EditKey {
   editId: string
+  /** Numbers count a person’s own edits: nobody can use up somebody else’s. */
+  userId: string
   clientId: string
   clientSeq: number
 }
 
 /** The answer an edit got, and for whom. */
 export interface Receipt extends EditKey {
-  userId: string
   outcome: SubmitOutcome
 }
 
@@ -39,7 +40,7 @@ export interface EditReads {
 }
 
 export interface EditTransaction extends EditReads {
-  /** By edit id, or by client and sequence number: whichever is known. */
+  /** By edit id, or by person, client and sequence number: whichever is known. */
   findReceipt(layoutId: string, key: EditKey): Receipt | null
   /** Appends an entry at head + 1 and stores the document after it. Throws when the head is another. */
   append(layoutId: string, entry: AcceptedEdit, document: LayoutDocument): void

@@ -152,7 +152,12 @@ function findReceipt(sql: WriteTransaction, layoutId: string, key: EditKey): Rec
   const receipts = sql.kysely.selectFrom('layout_edit_receipt').selectAll().where('layout_id', '=', layoutId)
   const row =
     sql.first(receipts.where('edit_id', '=', key.editId)) ??
-    sql.first(receipts.where('client_id', '=', key.clientId).where('client_seq', '=', key.clientSeq))
+    sql.first(
+      receipts
+        .where('user_id', '=', key.userId)
+        .where('client_id', '=', key.clientId)
+        .where('client_seq', '=', key.clientSeq),
+    )
   if (!row) return null
   return {
     editId: row.edit_id,

@@ -27,31 +27,30 @@ export interface EditResult {
 
 export type SubmittedEdit = Omit<SubmitRequest, 'layoutId'>
 
-/** An edit from a browser. A known one gets the answer it got the first time, whatever happened since. */
+/**
+ * An edit from a browser. `since` is what others did after the revision its author saw. A known
+ * one gets the answer it got the first time, whatever happened since.
+ */
 export function acceptEdit(
   transaction: EditTransaction,
   layout: StoredLayout,
   author: Principal,
   edit: SubmittedEdit,
+  since: readonly AcceptedEdit[],
   now: Date,
 ): EditResult {
-  const receipt = transaction.findReceipt(layout.layoutId, edit)
+  const { editId, clientId, clientSeq } = edit
+  const key = { editId, clientId, clientSeq, userId: author.userId }
+  const receipt = transaction.findReceipt(layout.layoutId, key)
   if (receipt) {
-    const isSame = receipt.userId === author.userId && receipt.editId === edit.editId
+    const isSame = receipt.userId === author.userId && receipt.editId === editId
     const outcome = isSame ? receipt.outcome : refusal('invalid', 'This edit number is already used.')
     return { outcome, layout, isNew: false }
   }
-  const judgement = judgeEdit(transaction, layout, author, edit, now)
+  const judgement = judgeEdit(layout, author, edit, since, now)
   const result = storeJudgement(transaction, layout, judgement)
   // Refusals too: an edit that its author was told is refused must not be accepted when a copy of it comes late.
-  const { editId, clientId, clientSeq } = edit
-  transaction.storeReceipt(layout.layoutId, {
-    editId,
-    clientId,
-    clientSeq,
-    userId: author.userId,
-    outcome: result.outcome,
-  })
+  transaction.storeReceipt(layout.layoutId, { ...key, outcome: result.outcome })
   return result
 }
 
@@ -64,7 +63,7 @@ export function acceptServerEdit(
   now: Date,
 ): EditResult {
   const numbered = { ...edit, ...serverKey(layout), baseRevision: layout.revision }
-  return storeJudgement(transaction, layout, judgeEdit(transaction, layout, author, numbered, now))
+  return storeJudgement(transaction, layout, judgeEdit(layout, author, numbered, [], now))
 }
 
 /** Status changes stand in the log like edits, so that what came before a freeze is settled by its revision. */
@@ -98,10 +97,10 @@ type Judgement =
   | { kind: 'answer'; outcome: SubmitOutcome }
 
 function judgeEdit(
-  transaction: EditTransaction,
   layout: StoredLayout,
   author: Principal,
   edit: SubmittedEdit,
+  since: readonly AcceptedEdit[],
   now: Date,
 ): Judgement {
   switch (decide(author, 'layout:edit', { workspaceId: layout.workspaceId, status: layout.status })) {
@@ -118,8 +117,6 @@ function judgeEdit(
   }
   if (JSON.stringify(edit.operations).length > MAX_EDIT_BYTES) return tooLarge('This edit is too large.')
 
-  const since =
-    edit.baseRevision < layout.revision ? transaction.readEntries(layout.layoutId, edit.baseRevision) : []
   const decision = decideSafely(layout.document, edit.operations, author.userId, since)
   switch (decision.kind) {
     case 'invalid':

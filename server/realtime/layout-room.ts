@@ -4,19 +4,21 @@
  * says, it says after that.
  */
 import type { Logger } from 'pino'
-import type {
-  AcceptedEdit,
-  JoinReply,
-  JoinRequest,
-  PresenceState,
-  PresenceUpdate,
-  RejectReason,
-  SubmitOutcome,
+import {
+  MAX_CATCH_UP_EDITS,
+  type AcceptedEdit,
+  type JoinReply,
+  type JoinRequest,
+  type PresenceState,
+  type PresenceUpdate,
+  type RejectReason,
+  type SubmitOutcome,
 } from '@shared/protocol/realtime'
 import { can } from '../accounts/policy'
 import { roleIn, type Principal } from '../accounts/principal'
-import type { EditStorage, EditTransaction, StoredLayout } from '../edits/edit-storage'
+import type { EditReads, EditStorage, EditTransaction, StoredLayout } from '../edits/edit-storage'
 import { acceptEdit, refusal, type EditResult, type SubmittedEdit } from '../edits/edits.service'
+import { RecentEntries } from './recent-entries'
 import type { RoomClock } from './room-clock'
 import { accessOf, catchUp } from './room-answers'
 import { RoomPresence } from './room-presence'
@@ -56,6 +58,7 @@ interface EditJob {
   session: Session
   edit: SubmittedEdit
   reply: (outcome: SubmitOutcome) => void
+  isTooFast: boolean
 }
 
 interface ExclusiveJob<Transaction extends EditTransaction> extends ExclusiveWork<Transaction> {
@@ -64,9 +67,12 @@ interface ExclusiveJob<Transaction extends EditTransaction> extends ExclusiveWor
 
 const TRY_AGAIN = refusal('unavailable', 'This could not be stored just now. It will be tried again.')
 
+const TOO_FAST = refusal('rateLimited', 'Too many edits at once. They will be sent again.')
+
 export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
   readonly #sessions = new Map<string, Session>()
   readonly #presence: RoomPresence
+  readonly #recent = new RecentEntries()
   #jobs: (EditJob | ExclusiveJob<Transaction>)[] = []
   #isDrainPlanned = false
 
@@ -122,19 +128,22 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
     this.#reportIdle()
   }
 
-  submit(connectionId: string, edit: SubmittedEdit, reply: (outcome: SubmitOutcome) => void): void {
+  /**
+   * `isTooFast`: the connection is beyond its limit. Such an edit passes through the queue as well,
+   * because only what comes after it has to wait for it, not what still waits before it.
+   */
+  submit(
+    connectionId: string,
+    edit: SubmittedEdit,
+    reply: (outcome: SubmitOutcome) => void,
+    isTooFast = false,
+  ): void {
     const session = this.#sessions.get(connectionId)
     if (!session) {
       reply(refusal('notJoined', 'Open the layout first.'))
       return
     }
-    this.#enqueue({ kind: 'edit', session, edit, reply })
-  }
-
-  /** The limit on a connection was hit: what comes after this edit has to wait for it. */
-  stall(connectionId: string, editId: string): void {
-    const session = this.#sessions.get(connectionId)
-    if (session) session.stalledEditId ??= editId
+    this.#enqueue({ kind: 'edit', session, edit, reply, isTooFast })
   }
 
   updatePresence(connectionId: string, update: Omit<PresenceUpdate, 'layoutId'>): void {
@@ -170,6 +179,7 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
   }
 
   broadcastEntry(entry: AcceptedEdit, exceptConnectionId?: string): void {
+    this.#recent.add(entry)
     const message = { layoutId: this.layoutId, edit: entry }
     this.parts.transport().broadcast(this.layoutId, 'edit:accepted', message, exceptConnectionId)
     this.parts.onListed(this.layout.workspaceId)
@@ -216,16 +226,18 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
       results = this.parts.storage.transaction((transaction) => {
         let layout = this.layout
         const resumed = new Set<string>()
+        const fresh: AcceptedEdit[] = []
         return jobs.map((job) => {
           if (isStalled(job, resumed)) return { job, result: null }
+          if (job.isTooFast) {
+            job.session.stalledEditId = job.edit.editId
+            resumed.delete(job.edit.editId)
+            return { job, result: null }
+          }
           resumed.add(job.edit.editId)
-          const result = acceptEdit(
-            transaction,
-            layout,
-            job.session.principal,
-            job.edit,
-            this.parts.clock.now(),
-          )
+          const since = this.#entriesSince(job.edit.baseRevision, transaction, fresh)
+          const result = acceptEdit(transaction, layout, job.session.principal, job.edit, since, this.#now())
+          if (result.isNew && 'edit' in result.outcome) fresh.push(result.outcome.edit)
           layout = result.layout
           return { job, result }
         })
@@ -236,6 +248,24 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
     }
     for (const { result } of results) if (result) this.layout = result.layout
     for (const { job, result } of results) this.#answer(job, result)
+  }
+
+  /** What others did since the author looked: committed entries, and those of this turn. */
+  #entriesSince(revision: number, transaction: EditReads, fresh: readonly AcceptedEdit[]): AcceptedEdit[] {
+    if (revision >= this.layout.revision) return fresh.filter((entry) => entry.revision > revision)
+    const from = Math.max(revision, this.layout.revision - MAX_CATCH_UP_EDITS)
+    let committed = this.#recent.since(from)
+    if (!committed) {
+      committed = transaction
+        .readEntries(this.layoutId, from)
+        .filter((entry) => entry.revision <= this.layout.revision)
+      this.#recent.replace(committed)
+    }
+    return [...committed, ...fresh]
+  }
+
+  #now(): Date {
+    return this.parts.clock.now()
   }
 
   /** One bad write must not take the others of its turn with it: each gets a transaction of its own. */
@@ -254,7 +284,7 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
 
   #answer(job: EditJob, result: EditResult | null): void {
     if (!result) {
-      job.reply(TRY_AGAIN)
+      job.reply(job.isTooFast ? TOO_FAST : TRY_AGAIN)
       return
     }
     if (job.session.stalledEditId === job.edit.editId) job.session.stalledEditId = null

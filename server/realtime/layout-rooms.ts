@@ -58,8 +58,8 @@ export interface LayoutRooms<Transaction extends EditTransaction = EditTransacti
     layoutId: string,
     edit: SubmittedEdit,
     reply: (outcome: SubmitOutcome) => void,
+    isTooFast?: boolean,
   ): void
-  stall(connectionId: string, layoutId: string, editId: string): void
   updatePresence(connectionId: string, update: PresenceUpdate): void
   changePrincipal(connectionId: string, principal: Principal): void
   /** Out at once, with a word to the client. */
@@ -151,14 +151,10 @@ export function createLayoutRooms<Transaction extends EditTransaction>({
 
     leave: leaveRoom,
 
-    submit(connectionId, layoutId, edit, reply) {
+    submit(connectionId, layoutId, edit, reply, isTooFast) {
       const room = roomJoinedBy(connectionId, layoutId)
-      if (room) room.submit(connectionId, edit, reply)
+      if (room) room.submit(connectionId, edit, reply, isTooFast)
       else reply(refusal('notJoined', 'Open the layout first.'))
-    },
-
-    stall: (connectionId, layoutId, editId) => {
-      roomJoinedBy(connectionId, layoutId)?.stall(connectionId, editId)
     },
 
     updatePresence(connectionId, { layoutId, ...update }) {

@@ -54,11 +54,7 @@ export function handleEvents(socket: RealtimeSocket, { rooms, limits, logger }: 
     const { layoutId, ...edit } = request
     const isWithinLimits =
       (await limits.allow(socket.id, 'edit')) && (await limits.allow(socket.id, 'operation', count))
-    if (!isWithinLimits) {
-      rooms.stall(socket.id, layoutId, edit.editId)
-      return answer(refusal('rateLimited', 'Too many edits at once. They will be sent again.'))
-    }
-    rooms.submit(socket.id, layoutId, edit, answer)
+    rooms.submit(socket.id, layoutId, edit, answer, !isWithinLimits)
   })
 
   on('presence:update', async (payload) => {

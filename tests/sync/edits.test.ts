@@ -128,11 +128,12 @@ describe('outcomes', () => {
     expect(await tomas.move(13, { clientId: 'client-Tomas', clientSeq: 9, editId: 'edit-1' })).toMatchObject(
       stolen,
     )
-    expect(await tomas.move(13, { clientId: 'client-Dina', clientSeq: 1, editId: 'edit-9' })).toMatchObject(
-      stolen,
-    )
+    // Nobody can use up somebody else's numbers.
+    const borrowed = { clientId: 'client-Dina', clientSeq: 2, editId: 'edit-9' }
+    expect(await tomas.move(13, borrowed)).toMatchObject({ outcome: 'accepted' })
+    expect(await dina.move(14, { clientSeq: 2, editId: 'edit-2' })).toMatchObject({ outcome: 'accepted' })
     expect(await dina.move(13, { clientSeq: 1, editId: 'edit-8' })).toMatchObject(stolen)
-    expect(world.layout.revision).toBe(1)
+    expect(world.layout.revision).toBe(3)
   })
 
   it('E9 an edit without the right to edit is forbidden, and stays so when the right comes later', async () => {
@@ -275,6 +276,47 @@ describe('the order of one connection', () => {
     expect(await dina.move(11, { clientSeq: 1, editId: 'e1' })).toMatchObject({ outcome: 'accepted' })
     expect(await dina.move(12, { clientSeq: 2, editId: 'e2' })).toMatchObject({ outcome: 'accepted' })
     expect(world.storage.readEntries(LAYOUT, 0).map(({ editId }) => editId)).toEqual(['e1', 'e2'])
+  })
+
+  it('R10 an edit that came too fast holds up those after it, not those before it', async () => {
+    const world = memoryWorld()
+    const dina = await someoneIn(world)
+    const answers: SubmitOutcome[] = []
+    const send = (clientSeq: number, isTooFast: boolean) =>
+      world.rooms.submit(
+        dina.connectionId,
+        LAYOUT,
+        {
+          clientId: 'client-Dina',
+          clientSeq,
+          editId: `e${clientSeq}`,
+          baseRevision: 0,
+          label: 'Move',
+          operations: [
+            { type: 'set', target: { kind: 'hub', id: 'A' }, field: 'stationMm', value: 20 + clientSeq },
+          ],
+        },
+        (outcome) => answers.push(outcome),
+        isTooFast,
+      )
+    // One turn: the third is too fast, the fourth would be in time again.
+    for (const [seq, isTooFast] of [
+      [1, false],
+      [2, false],
+      [3, true],
+      [4, false],
+    ] as const)
+      send(seq, isTooFast)
+    world.clock.runDeferred()
+    expect(answers.map((answer) => ('reason' in answer ? answer.reason : answer.outcome))).toEqual([
+      'accepted',
+      'accepted',
+      'rateLimited',
+      'unavailable',
+    ])
+    for (const seq of [3, 4]) send(seq, false)
+    world.clock.runDeferred()
+    expect(world.storage.readEntries(LAYOUT, 0).map(({ editId }) => editId)).toEqual(['e1', 'e2', 'e3', 'e4'])
   })
 
   it('C14 a client that is put off waits, and sends again in order', async () => {

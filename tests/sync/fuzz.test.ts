@@ -116,6 +116,9 @@ class FuzzRun {
       const count = 1 + random.integer(4)
       this.steps.push(`the next ${count} writes fail`)
       this.breakStorage?.(count)
+    } else if (random.chance(0.5)) {
+      world.lines.tooFastCount = 1 + random.integer(3)
+      this.steps.push(`the next ${world.lines.tooFastCount} edits are too fast`)
     } else {
       this.steps.push('time passes')
       world.clock.advance(random.integer(3_000))
@@ -232,7 +235,7 @@ class FuzzRun {
     const logged = new Set(inLog)
     this.world.storage.transaction((transaction) => {
       for (const [editId, userId] of this.committed) {
-        const receipt = transaction.findReceipt(LAYOUT, { editId, clientId: '', clientSeq: 0 })
+        const receipt = transaction.findReceipt(LAYOUT, { editId, userId, clientId: '', clientSeq: 0 })
         const fate = receipt?.outcome.outcome ?? (refused.has(editId) ? 'rejected' : 'lost')
         expect([editId, fate]).not.toEqual([editId, 'lost'])
         expect([editId, logged.has(editId)]).toEqual([editId, fate === 'accepted' || fate === 'adjusted'])

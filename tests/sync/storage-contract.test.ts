@@ -99,9 +99,11 @@ describe.each(storages)('the storage in %s', (_name, make) => {
       for (const each of [adjusted, refused, nothing]) tx.storeReceipt(LAYOUT, each)
     })
     storage.transaction((tx) => {
-      const unknown = { editId: 'x', clientId: 'x', clientSeq: 1 }
+      const unknown = { editId: 'x', userId: 'user-dina', clientId: 'x', clientSeq: 1 }
       expect(tx.findReceipt(LAYOUT, { ...unknown, editId: 'edit-1' })).toEqual(adjusted)
       expect(tx.findReceipt(LAYOUT, { ...unknown, clientId: 'client-1' })).toEqual(adjusted)
+      // The same number of somebody else is another edit.
+      expect(tx.findReceipt(LAYOUT, { ...unknown, clientId: 'client-1', userId: 'user-tomas' })).toBeNull()
       expect(tx.findReceipt(LAYOUT, refused)).toEqual(refused)
       expect(tx.findReceipt(LAYOUT, nothing)).toEqual(nothing)
       expect(tx.findReceipt(LAYOUT, unknown)).toBeNull()

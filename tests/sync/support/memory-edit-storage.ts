@@ -105,7 +105,12 @@ export class MemoryEditStorage implements EditStorage<MemoryEditTransaction> {
 function findReceipt(receipts: Receipt[], key: EditKey): Receipt | null {
   return (
     receipts.find((receipt) => receipt.editId === key.editId) ??
-    receipts.find((receipt) => receipt.clientId === key.clientId && receipt.clientSeq === key.clientSeq) ??
+    receipts.find(
+      (receipt) =>
+        receipt.userId === key.userId &&
+        receipt.clientId === key.clientId &&
+        receipt.clientSeq === key.clientSeq,
+    ) ??
     null
   )
 }

@@ -26,6 +26,8 @@ export class MemoryLines {
   readonly #pipes = new Map<string, Pipe>()
   readonly #audiences = new Map<string, Set<string>>()
   readonly workspaceMessages: unknown[] = []
+  /** How many of the next edits arrive beyond the limit of their connection. */
+  tooFastCount = 0
   #lastId = 0
 
   constructor(private readonly rooms: LayoutRooms) {
@@ -69,7 +71,10 @@ export class MemoryLines {
     return () => {
       if (!this.#pipes.has(pipe.id)) return
       const { layoutId, ...edit } = submitRequestSchema.parse(copy)
-      this.rooms.submit(pipe.id, layoutId, edit, (outcome) => this.#answer(pipe, reply, outcome))
+      const isTooFast = this.tooFastCount > 0
+      if (isTooFast) this.tooFastCount -= 1
+      const answer = (outcome: unknown) => this.#answer(pipe, reply, outcome)
+      this.rooms.submit(pipe.id, layoutId, edit, answer, isTooFast)
     }
   }
 
