@@ -26,8 +26,12 @@ export interface ContactState {
 export interface ContactBasis {
   system: ContactSystem
   closed: ContactFactor
-  units: Float64Array
+  /** Null above a number of hubs from which on one solution a state is cheaper than all unit solutions. */
+  units: Float64Array | null
 }
+
+/** Unit solutions grow with the square of the hubs, one solution a state with their number. */
+const MOST_HUBS_WITH_UNITS = 12
 
 export interface ContactSolution {
   state: ContactState
@@ -61,7 +65,8 @@ const MAX_PASSES = 40
  */
 export function contactBasis(system: ContactSystem): ContactBasis {
   const closed = factoriseContact(system, FRICTIONLESS_CLOSED)
-  return { system, closed, units: unitSolutions(system, closed) }
+  const units = system.model.hubs.length <= MOST_HUBS_WITH_UNITS ? unitSolutions(system, closed) : null
+  return { system, closed, units }
 }
 
 function requireState(system: ContactSystem, state: ContactState): void {
@@ -220,22 +225,16 @@ export function solveContact(basis: ContactBasis, state: ContactState): ContactS
   const { system } = basis
   requireState(system, state)
   const coefficients = coefficientsOf(system, state)
-  const count = coefficients.length
   const contact: Contact = { open: new Set(), slipping: new Map() }
   const hasFriction = state.friction?.some((value) => value > 0) ?? false
 
-  let factor = basis.closed
-  let displacement: Float64Array
-  if (hasFriction) {
-    factor = factoriseContact(system, { open: new Set(), stuck: stuckNodes(system, state, contact) })
-    displacement = solveWith(system, factor, state, coefficients, contact)
-  } else {
-    displacement = nodalDisplacement(system, factor, state, (row) => {
-      let value = 0
-      for (let k = 0; k < count; k++) value += coefficients[k]! * basis.units[row * count + k]!
-      return value
-    })
-  }
+  let factor = hasFriction
+    ? factoriseContact(system, { open: new Set(), stuck: stuckNodes(system, state, contact) })
+    : basis.closed
+  let displacement =
+    hasFriction || basis.units === null
+      ? solveWith(system, factor, state, coefficients, contact)
+      : superpose(basis, basis.units, state, coefficients)
   let forces = seatForces(system, state, displacement)
   let passes = 0
   let hasSettled = false
@@ -287,4 +286,18 @@ function solveWith(
     }
   solveEnvelope(factor.factor, side, 1)
   return nodalDisplacement(system, factor, state, (row) => side[row]!)
+}
+
+function superpose(
+  { system, closed }: ContactBasis,
+  units: Float64Array,
+  state: ContactState,
+  coefficients: Float64Array,
+): Float64Array {
+  const count = coefficients.length
+  return nodalDisplacement(system, closed, state, (row) => {
+    let value = 0
+    for (let k = 0; k < count; k++) value += coefficients[k]! * units[row * count + k]!
+    return value
+  })
 }

@@ -58,7 +58,6 @@ const tightOf = (hub: ContactHubResult): ContactTight => ({
   largestPressureMPa: toMPa(hub.largestPressure),
   boreHoopMaxMPa: toMPa(hub.boreHoopLargest),
   boreEquivalentMaxMPa: toMPa(hub.boreEquivalentLargest),
-  outerDiameterGrowthMaxUm: toUm(hub.outsideGrowth.largest),
   openLengthMm: toMm(hub.openLength),
 })
 
@@ -106,22 +105,27 @@ export function calculateContact(
   if (prepared.reason !== null) return refusal(prepared.reason, leftOut)
   const basis = prepared.value
   const rest = solveState(basis, seats, { interference: (seat) => seat.interference.max, seatCase: null })
-  const hubs = seats.map((seat, k): ContactHubBlock => ({
-    id: seat.id,
-    atRest: tightOf(rest.hubs[k]!),
-    loadCases: [],
-  }))
-  for (const { id } of document.loadCases) {
+  const states = document.loadCases.map(({ id }) => {
     const seatCase = (seat: Seat) => seat.cases.find((c) => c.id === id)
-    const loose = solveState(basis, seats, { interference: (seat) => seat.interference.min, seatCase })
-    const tight = solveState(basis, seats, { interference: (seat) => seat.interference.max, seatCase })
-    seats.forEach((seat, k) => {
+    return {
+      seatCase,
+      loose: solveState(basis, seats, { interference: (seat) => seat.interference.min, seatCase }),
+      tight: solveState(basis, seats, { interference: (seat) => seat.interference.max, seatCase }),
+    }
+  })
+  const hubs = seats.flatMap((seat, k): ContactHubBlock[] => {
+    const atRest = rest.hubs[k]
+    if (!atRest) return []
+    const outerDiameterGrowthMaxUm = toUm(atRest.outsideGrowth.largest)
+    const loadCases = states.flatMap(({ seatCase, loose, tight }): ContactCase[] => {
       const ofSeat = seatCase(seat)
-      if (!ofSeat) return
-      const hasSettled = loose.hasSettled && tight.hasSettled
-      hubs[k]!.loadCases.push(caseOf(seat, ofSeat, loose.hubs[k]!, tight.hubs[k]!, hasSettled))
+      const looseHub = loose.hubs[k]
+      const tightHub = tight.hubs[k]
+      if (!ofSeat || !looseHub || !tightHub) return []
+      return [caseOf(seat, ofSeat, looseHub, tightHub, loose.hasSettled && tight.hasSettled)]
     })
-  }
+    return [{ id: seat.id, atRest: { ...tightOf(atRest), outerDiameterGrowthMaxUm }, loadCases }]
+  })
   return {
     notComputable: null,
     mesh: { freedoms: basis.closed.factor.size, edgeSizeShare: quality.edge },

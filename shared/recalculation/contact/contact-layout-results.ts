@@ -12,7 +12,7 @@ export interface ContactLayoutResults {
 export interface ContactHubBlock {
   id: string
   /** At the most interference after embedding, cold and standing. */
-  atRest: ContactTight
+  atRest: ContactTight & { outerDiameterGrowthMaxUm: number }
   loadCases: ContactCase[]
 }
 
@@ -23,7 +23,6 @@ export interface ContactTight {
   largestPressureMPa: number
   boreHoopMaxMPa: number
   boreEquivalentMaxMPa: number
-  outerDiameterGrowthMaxUm: number
   openLengthMm: number
 }
 
