@@ -44,11 +44,11 @@ export const METHOD_NOTES: MethodNotes = {
     },
     {
       title: 'Fatigue',
-      text: 'Reversed bending and steady torsion with notch factors at seat edges and shoulders, surface and size factors.',
+      text: 'Reversed bending and steady torsion on the Goodman line, with notch factors at seat edges and shoulders, surface and size factors; unlimited life.',
     },
     {
-      title: 'Critical speed',
-      text: 'Lateral natural frequencies of the stepped shaft with the masses of the hubs, without gyroscopic effect.',
+      title: 'Critical speeds',
+      text: 'Lateral natural frequencies of the stepped shaft with the masses of the hubs, without gyroscopic effect; torsional ones of the shaft alone.',
     },
     {
       title: 'Assembly',
@@ -58,6 +58,7 @@ export const METHOD_NOTES: MethodNotes = {
   notCovered: [
     'Pressure peaks at the ends of a hub, and slip that creeps in under rotating bending (fretting).',
     'Plastic yielding of a fit used on purpose, creep and relaxation at high temperature.',
+    'Shear deflection and weight of the shaft, radial force and tilting moment on a seat.',
     'Stiffening of the shaft by the hubs, and the stiffness of webs, spokes and uneven hub walls.',
     'Keys, splines, tapers, adhesives and fits with intermediate rings.',
     'Spread of friction, of material values and of temperatures beyond the values entered.',

@@ -4,7 +4,7 @@ import type { SheetPages } from './sheet-pages'
 import type { SheetRelease } from './sheet-release'
 import { type TableCell, type TableColumn, writeTable } from './sheet-table'
 import { loadCaseWords } from './sheet-words'
-import { QUIET } from './sheet-writer'
+import { QUIET } from './sheet-style'
 
 export function writeCasesTable(pages: SheetPages, release: SheetRelease): void {
   const { document, results } = release

@@ -1,6 +1,6 @@
 /** From stations and radii in millimetres of the part to millimetres of the paper. */
 import type { Point } from '@shared/drawing/half-section-geometry'
-import type { XY } from './sheet-writer'
+import type { XY } from './sheet-style'
 
 export interface DrawingFrame {
   /** Millimetres of paper for one millimetre of the part. */

@@ -4,7 +4,7 @@ import { drawItemList, itemListHeight } from './item-list'
 import { drawShaftDrawing, planShaftDrawing } from './shaft-drawing'
 import { MARGIN_MM, PAPER, type SheetPages, STRIP_HEIGHT_MM } from './sheet-pages'
 import type { SheetRelease } from './sheet-release'
-import { QUIET, type TextStyle } from './sheet-writer'
+import { QUIET, type TextStyle } from './sheet-style'
 import { drawTitleBlock, TITLE_BLOCK_HEIGHT_MM, TITLE_BLOCK_WIDTH_MM } from './title-block'
 
 const NOTE: TextStyle = { sizePt: 7, colour: QUIET }

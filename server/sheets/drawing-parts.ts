@@ -1,7 +1,8 @@
 /** Shaft, hubs and bearings in half section: cut above the axis, seen from outside below it. */
 import type { DrawnBearing, DrawnHub, HalfSection } from '@shared/drawing/half-section-geometry'
 import { type DrawingFrame, onPaper, paperX, paperY } from './drawing-frame'
-import { type LineStyle, type SheetWriter, THICK_MM, THIN_MM, type XY } from './sheet-writer'
+import { type LineStyle, THICK_MM, THIN_MM, type XY } from './sheet-style'
+import type { SheetWriter } from './sheet-writer'
 
 const EDGE: LineStyle = { widthMm: THICK_MM }
 const THIN: LineStyle = { widthMm: THIN_MM }

@@ -5,7 +5,7 @@ import { BODY, type SheetPages } from './sheet-pages'
 import type { SheetRelease } from './sheet-release'
 import { type TableCell, type TableColumn, writeTable } from './sheet-table'
 import { loadCaseWords, partWords, SEVERITY_WORDS } from './sheet-words'
-import { BAD, STRAW } from './sheet-writer'
+import { BAD, STRAW } from './sheet-style'
 
 const SEVERITY_COLOURS = { fails: BAD, warns: STRAW, notes: undefined } as const
 

@@ -3,7 +3,8 @@ import type { Hub, LayoutDocument } from '@shared/layout/layout-document'
 import type { HubResult } from '@shared/recalculation/layout-results'
 import { millimetres, plain } from './sheet-format'
 import type { SheetRelease } from './sheet-release'
-import { QUIET, type SheetWriter, type TextStyle, THIN_MM } from './sheet-writer'
+import { QUIET, type TextStyle, THIN_MM } from './sheet-style'
+import type { SheetWriter } from './sheet-writer'
 
 const TEXT: TextStyle = { sizePt: 7.4 }
 const HEAD: TextStyle = { sizePt: 6, colour: QUIET, weight: 'strong' }

@@ -9,7 +9,7 @@ import { type SheetPages, SMALL_QUIET } from './sheet-pages'
 import type { SheetRelease } from './sheet-release'
 import { type CellLine, type TableCell, type TableColumn, writeTable } from './sheet-table'
 import { loadCaseWords, materialWords, METHOD_WORDS } from './sheet-words'
-import { BAD, QUIET } from './sheet-writer'
+import { BAD, QUIET } from './sheet-style'
 import { drawWindow, WINDOW_DRAWING_HEIGHT_MM } from './window-drawing'
 
 const COLUMNS: TableColumn[] = [

@@ -5,7 +5,8 @@ import { millimetres, significant } from './sheet-format'
 import type { SheetPages } from './sheet-pages'
 import type { SheetRelease } from './sheet-release'
 import { loadCaseWords } from './sheet-words'
-import { INK, QUIET, type SheetWriter, STEEL, STRAW, type TextStyle, type XY } from './sheet-writer'
+import { INK, QUIET, STEEL, STRAW, type TextStyle, type XY } from './sheet-style'
+import type { SheetWriter } from './sheet-writer'
 
 const PLOTS: { title: string; unit: string; values: (diagrams: ShaftDiagrams) => number[] }[] = [
   { title: 'Torque', unit: 'N·m', values: (diagrams) => diagrams.torqueNm },

@@ -1,9 +1,10 @@
 /** The half section with all that stands around it, at the largest standard scale that fits. */
 import type { HalfSection } from '@shared/drawing/half-section-geometry'
 import { standardScale } from '@shared/drawing/standard-scale'
-import { bottomBandHeight, drawBottomBand, drawTopBand, topBandHeight } from './drawing-dimensions'
+import { bottomBandHeight, drawBottomBand } from './drawing-bottom-band'
 import type { DrawingFrame } from './drawing-frame'
 import { drawParts } from './drawing-parts'
+import { drawTopBand, topBandHeight } from './drawing-top-band'
 import type { SheetWriter } from './sheet-writer'
 
 export interface DrawingArea {

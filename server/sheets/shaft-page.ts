@@ -39,7 +39,12 @@ function criticalSpeedWords(release: SheetRelease): string {
   if (first === undefined) return 'Lateral critical speeds are not computed.'
   const fastest = Math.max(0, ...release.document.loadCases.map((loadCase) => loadCase.speedRpm))
   const further = second === undefined ? '' : `, second at ${significant(second, 4)} 1/min`
-  return `First lateral critical speed at ${significant(first, 4)} 1/min${further}; the shaft runs at up to ${plain(fastest)} 1/min.`
+  const [torsional] = release.results.shaft.torsionalHz
+  const twist =
+    torsional === undefined
+      ? ''
+      : ` First torsional frequency of the shaft alone ${significant(torsional)} Hz.`
+  return `First lateral critical speed at ${significant(first, 4)} 1/min${further}; the shaft runs at up to ${plain(fastest)} 1/min.${twist}`
 }
 
 const CASE_COLUMNS: TableColumn[] = [

@@ -1,7 +1,9 @@
 /** Paper, frame, the strip at the foot of every sheet and the flow from one sheet to the next. */
+import { CAUTIONS_LINE } from '@shared/recalculation/cautions'
 import { utc } from './sheet-format'
 import type { SheetRelease } from './sheet-release'
-import { BAD, HAIRLINE, QUIET, SheetWriter, type TextStyle, THICK_MM } from './sheet-writer'
+import { BAD, HAIRLINE, QUIET, type TextStyle, THICK_MM } from './sheet-style'
+import { SheetWriter } from './sheet-writer'
 
 /** One size for every sheet: the drawing at a large scale and the schedule in one row a hub need the room. */
 export const PAPER = { name: 'A3', widthMm: 420, heightMm: 297 } as const
@@ -18,9 +20,6 @@ export const SMALL_QUIET: TextStyle = { sizePt: 7.8, colour: QUIET }
 export const HEADING: TextStyle = { sizePt: 13, weight: 'strong' }
 export const SUBHEADING: TextStyle = { sizePt: 10, weight: 'strong' }
 const LABEL: TextStyle = { sizePt: 6.4, colour: QUIET }
-
-const SHORT_CAUTION =
-  'Results support a qualified engineer and replace neither the applicable codes nor licensed practice.'
 
 export class SheetPages {
   /** Where the next thing goes. */
@@ -136,7 +135,7 @@ export class SheetPages {
       upper,
       { sizePt: 8 },
     )
-    writer.text(`${SHORT_CAUTION} Hubstead, engine ${release.engineVersion}.`, left + 3, lower, LABEL)
+    writer.text(`${CAUTIONS_LINE} Hubstead, engine ${release.engineVersion}.`, left + 3, lower, LABEL)
   }
 }
 

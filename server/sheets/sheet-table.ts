@@ -1,7 +1,8 @@
 /** Tables that wrap inside their cells, break between rows and repeat their head. */
 import type { SheetPages } from './sheet-pages'
 import { RULE, TABLE } from './sheet-pages'
-import { type SheetWriter, type TextStyle, THICK_MM, QUIET } from './sheet-writer'
+import { type TextStyle, THICK_MM, QUIET } from './sheet-style'
+import type { SheetWriter } from './sheet-writer'
 
 export interface TableColumn {
   /** Each line of the head on its own; the last one usually holds the unit. */

@@ -3,42 +3,21 @@
  * Knows paper, not shafts. Bytes depend on what is written and the date given, nothing else.
  */
 import PDFDocument from 'pdfkit'
-import { DRAWN_SIGNS, type DrawnSign, type FontWeight, sheetFonts, textRuns } from './sheet-fonts'
-
-export const PT_PER_MM = 72 / 25.4
-/** Share of the letter size from baseline to the top of a capital. */
-const CAP_HEIGHT = 0.72
-const LINE_SPACING = 1.32
-const LOWERED_SIZE = 0.64
-const LOWERED_DROP = 0.14
-
-export const INK = '#1F242C'
-export const QUIET = '#5B6472'
-export const HAIRLINE = '#C9C2B3'
-export const GOOD = '#2E7A5A'
-export const BAD = '#B0392B'
-export const STRAW = '#8A5F10'
-export const STEEL = '#2B4C7E'
-
-/** Line widths of drawing practice: visible edges twice the thin lines (ISO 128, from memory). */
-export const THICK_MM = 0.35
-export const THIN_MM = 0.18
-
-export interface TextStyle {
-  sizePt: number
-  weight?: FontWeight
-  colour?: string
-  align?: 'left' | 'right' | 'centre'
-}
-export interface LineStyle {
-  widthMm?: number
-  colour?: string
-  dashMm?: number[]
-}
-export interface XY {
-  x: number
-  y: number
-}
+import { cacheLayout } from './cached-layout'
+import { drawSign } from './drawn-signs'
+import { DRAWN_SIGNS, sheetFonts, textRuns } from './sheet-fonts'
+import {
+  CAP_HEIGHT,
+  INK,
+  LINE_SPACING,
+  type LineStyle,
+  LOWERED_DROP,
+  LOWERED_SIZE,
+  PT_PER_MM,
+  type TextStyle,
+  THIN_MM,
+  type XY,
+} from './sheet-style'
 
 /** Figures of equal width. Asked for only where there are digits: a text without features is laid out from a cache. */
 const digitFeatures = (text: string): { features?: ['tnum', 'kern'] } =>
@@ -48,6 +27,7 @@ export class SheetWriter {
   private readonly pdf: PDFKit.PDFDocument
   private readonly ended: Promise<Buffer>
   private readonly widthsEm = new Map<string, number>()
+  private readonly cachedFonts = new Set<string>()
 
   constructor(about: { title: string; author: string; subject: string; keywords: string; createdAt: Date }) {
     this.pdf = new PDFDocument({
@@ -121,13 +101,13 @@ export class SheetWriter {
     const colour = style.colour ?? INK
     for (const run of textRuns(text, style.weight ?? 'regular')) {
       if (run.kind === 'sign') {
-        this.sign(run.sign, at, baseline, style.sizePt, colour)
+        drawSign(this.pdf, run.sign, at, baseline, style.sizePt, colour)
         at += DRAWN_SIGNS[run.sign].widthEm * style.sizePt
         continue
       }
       const size = style.sizePt * (run.isLowered ? LOWERED_SIZE : 1)
       const width = this.runWidthEm(run.text, run.fontName) * size
-      this.pdf.font(run.fontName).fontSize(size).fillColor(colour)
+      this.useFont(run.fontName, size).fillColor(colour)
       this.pdf.text(run.text, at, baseline + (run.isLowered ? style.sizePt * LOWERED_DROP : 0), {
         lineBreak: false,
         baseline: 'alphabetic',
@@ -277,12 +257,21 @@ export class SheetWriter {
     this.pdf.restore()
   }
 
+  private useFont(name: string, sizePt: number): PDFKit.PDFDocument {
+    this.pdf.font(name).fontSize(sizePt)
+    if (!this.cachedFonts.has(name)) {
+      cacheLayout(this.pdf)
+      this.cachedFonts.add(name)
+    }
+    return this.pdf
+  }
+
   /** Widths grow with the size, so each run is laid out once. */
   private runWidthEm(text: string, fontName: string): number {
     const key = `${fontName} ${text}`
     let widthEm = this.widthsEm.get(key)
     if (widthEm === undefined) {
-      widthEm = this.pdf.font(fontName).fontSize(100).widthOfString(text, digitFeatures(text)) / 100
+      widthEm = this.useFont(fontName, 100).widthOfString(text, digitFeatures(text)) / 100
       this.widthsEm.set(key, widthEm)
     }
     return widthEm
@@ -314,39 +303,5 @@ export class SheetWriter {
     if (dash) this.pdf.dash(dash.map((length) => length * PT_PER_MM) as unknown as number, {})
     this.pdf.stroke(style.colour ?? INK)
     if (dash) this.pdf.undash()
-  }
-
-  /** Draws a sign in points and lays its spelling under it unseen, so that a text search finds it. */
-  private sign(sign: DrawnSign, x: number, baseline: number, size: number, colour: string): void {
-    const { widthEm, spelling } = DRAWN_SIGNS[sign]
-    const pdf = this.pdf
-    pdf.save()
-    pdf
-      .fillOpacity(0)
-      .font('manrope-regular-latin')
-      .fontSize(size * 0.5)
-    pdf.text(spelling, x, baseline, { lineBreak: false, baseline: 'alphabetic' })
-    pdf.restore()
-    pdf.fillOpacity(1)
-    const w = widthEm * size
-    const cap = CAP_HEIGHT * size
-    const middle = baseline - cap / 2
-    pdf.lineWidth(size * 0.075).lineJoin('miter')
-    if (sign === '⌀') {
-      pdf.circle(x + w / 2, middle, cap * 0.42)
-      pdf.moveTo(x + w * 0.18, baseline + size * 0.02).lineTo(x + w * 0.82, baseline - cap - size * 0.02)
-    } else if (sign === '→') {
-      pdf.moveTo(x + w * 0.08, middle).lineTo(x + w * 0.92, middle)
-      pdf.moveTo(x + w * 0.66, middle - size * 0.17).lineTo(x + w * 0.92, middle)
-      pdf.lineTo(x + w * 0.66, middle + size * 0.17)
-    } else if (sign === '□') {
-      pdf.rect(x + w * 0.14, baseline - cap, w * 0.72, cap)
-    } else {
-      const [tip, back] = sign === '≥' ? [0.86, 0.14] : [0.14, 0.86]
-      pdf.moveTo(x + w * back, middle - size * 0.26).lineTo(x + w * tip, middle - size * 0.02)
-      pdf.lineTo(x + w * back, middle + size * 0.2)
-      pdf.moveTo(x + w * 0.14, baseline).lineTo(x + w * 0.86, baseline)
-    }
-    pdf.stroke(colour)
   }
 }

@@ -2,7 +2,8 @@
 import { safety, utc } from './sheet-format'
 import { PAPER } from './sheet-pages'
 import type { SheetRelease } from './sheet-release'
-import { BAD, QUIET, type SheetWriter, type TextStyle, THICK_MM, THIN_MM } from './sheet-writer'
+import { BAD, QUIET, type TextStyle, THICK_MM, THIN_MM } from './sheet-style'
+import type { SheetWriter } from './sheet-writer'
 
 export const TITLE_BLOCK_WIDTH_MM = 180
 const ROWS_MM = [9, 15, 9, 9] as const

@@ -8,7 +8,8 @@ import {
 } from '@shared/drawing/interference-window-geometry'
 import { spreadLabels } from '@shared/drawing/spread-labels'
 import { whole } from './sheet-format'
-import { BAD, GOOD, INK, QUIET, type SheetWriter, type TextStyle, THIN_MM } from './sheet-writer'
+import { BAD, GOOD, INK, QUIET, type TextStyle, THIN_MM } from './sheet-style'
+import type { SheetWriter } from './sheet-writer'
 
 const NUMBER: TextStyle = { sizePt: 6.5 }
 const TRACK_MM = 4.2

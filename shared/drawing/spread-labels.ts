@@ -60,35 +60,3 @@ export function spreadLabels(
   }
   return centres
 }
-
-/**
- * Shares labels out over as few rows as will hold them, taking turns from left to right, so that
- * neighbours stand at different heights. Null when even `maxRows` rows are too short.
- */
-export function spreadOverRows(
-  wishes: readonly LabelWish[],
-  line: { from: number; to: number },
-  gap: number,
-  maxRows: number,
-): { row: number; centre: number }[] | null {
-  const order = wishes.map((wish, index) => ({ wish, index })).sort((a, b) => a.wish.centre - b.wish.centre)
-  for (let rows = 1; rows <= maxRows; rows += 1) {
-    const placed = new Array<{ row: number; centre: number }>(wishes.length)
-    let fits = true
-    for (let row = 0; row < rows && fits; row += 1) {
-      const members = order.filter((_, place) => place % rows === row)
-      const centres = spreadLabels(
-        members.map((member) => member.wish),
-        line,
-        gap,
-      )
-      if (!centres) fits = false
-      else
-        members.forEach((member, place) => {
-          placed[member.index] = { row, centre: centres[place] ?? 0 }
-        })
-    }
-    if (fits) return placed
-  }
-  return null
-}
