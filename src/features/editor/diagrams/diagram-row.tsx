@@ -17,7 +17,7 @@ const TONES: Record<DiagramSeries['tone'], { text: string; stroke: string; fill:
   plum: { text: 'text-plum', stroke: 'stroke-plum', fill: 'fill-plum' },
   steel: { text: 'text-steel', stroke: 'stroke-steel', fill: 'fill-steel' },
   straw: { text: 'text-straw-ink', stroke: 'stroke-straw', fill: 'fill-straw' },
-  bronze: { text: 'text-bronze', stroke: 'stroke-bronze', fill: 'fill-bronze' },
+  bronze: { text: 'text-bronze-ink', stroke: 'stroke-bronze', fill: 'fill-bronze' },
 }
 
 const PADDING_PX = 5

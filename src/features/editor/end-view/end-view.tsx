@@ -51,7 +51,7 @@ export function EndView({ document: newest }: { document: LayoutDocument }) {
       <EndViewDrawing document={document} phases={phases} forces={forces} from={from} />
       {phases.length > 0 && (
         <>
-          <h3 className="mt-1 text-xs font-bold text-bronze">Angles</h3>
+          <h3 className="mt-1 text-xs font-bold text-bronze-ink">Angles</h3>
           <ul className="text-xs tabular-nums">
             {phases.map((mark) => (
               <li key={mark.hubId}>
