@@ -1,4 +1,13 @@
-import { type KeyboardEvent, type ReactNode, useEffect, useId, useRef, useState } from 'react'
+import {
+  type CSSProperties,
+  type KeyboardEvent,
+  type ReactNode,
+  useEffect,
+  useId,
+  useLayoutEffect,
+  useRef,
+  useState,
+} from 'react'
 import { classNames } from './class-names'
 import { Icon, type IconName } from './icon'
 
@@ -14,6 +23,9 @@ export type MenuItem =
   | { kind: 'choice'; label: string; isChosen: boolean; onSelect: () => void }
   | { kind: 'heading'; label: string }
   | { kind: 'separator' }
+
+/** Between the button, the list and the edge of the window. */
+const LIST_GAP_PX = 4
 
 /**
  * A button that opens a list of actions. Arrow keys, Home, End and first letters move; Escape and Tab close;
@@ -36,6 +48,8 @@ export function Menu({
   const [isOpen, setIsOpen] = useState(false)
   const root = useRef<HTMLDivElement>(null)
   const trigger = useRef<HTMLButtonElement>(null)
+  const list = useRef<HTMLDivElement>(null)
+  const [place, setPlace] = useState<CSSProperties>({})
   const menuId = useId()
 
   const entries = () => [
@@ -46,14 +60,39 @@ export function Menu({
     trigger.current?.focus()
   }
 
+  // Fixed to the window: inside a scrolling table the list would be cut off, or would scroll the table.
+  useLayoutEffect(() => {
+    if (!isOpen || !trigger.current || !list.current) return
+    const button = trigger.current.getBoundingClientRect()
+    const height = list.current.scrollHeight
+    const roomBelow = window.innerHeight - button.bottom
+    const isBelow = roomBelow >= height + 2 * LIST_GAP_PX || roomBelow >= button.top
+    setPlace({
+      ...(isBelow
+        ? { top: button.bottom + LIST_GAP_PX, maxHeight: roomBelow - 2 * LIST_GAP_PX }
+        : { bottom: window.innerHeight - button.top + LIST_GAP_PX, maxHeight: button.top - 2 * LIST_GAP_PX }),
+      ...(align === 'end'
+        ? { right: Math.max(LIST_GAP_PX, document.documentElement.clientWidth - button.right) }
+        : { left: button.left }),
+    })
+  }, [isOpen, align])
+
   useEffect(() => {
     if (!isOpen) return
-    entries()[0]?.focus()
+    entries()[0]?.focus({ preventScroll: true })
     const onPointerDown = (event: PointerEvent) => {
       if (event.target instanceof Node && !root.current?.contains(event.target)) setIsOpen(false)
     }
+    // The list does not move with what scrolls under it.
+    const onScroll = (event: Event) => {
+      if (event.target instanceof Node && !list.current?.contains(event.target)) setIsOpen(false)
+    }
     document.addEventListener('pointerdown', onPointerDown)
-    return () => document.removeEventListener('pointerdown', onPointerDown)
+    document.addEventListener('scroll', onScroll, true)
+    return () => {
+      document.removeEventListener('pointerdown', onPointerDown)
+      document.removeEventListener('scroll', onScroll, true)
+    }
   }, [isOpen])
 
   const onKeyDown = (event: KeyboardEvent) => {
@@ -104,13 +143,12 @@ export function Menu({
       </button>
       {isOpen && (
         <div
+          ref={list}
           id={menuId}
+          style={place}
           role="menu"
           aria-label={label}
-          className={classNames(
-            'absolute top-full z-50 mt-1 max-h-[70dvh] min-w-48 overflow-auto rounded-md border border-hairline bg-card py-1 text-sm text-ink shadow-lg',
-            align === 'end' ? 'right-0' : 'left-0',
-          )}
+          className="fixed z-50 min-w-48 overflow-auto rounded-md border border-hairline bg-card py-1 text-sm text-ink shadow-lg text-left"
         >
           {items.map((item, index) => {
             if (item.kind === 'separator')

@@ -53,8 +53,8 @@ interface FullWindowProps {
   units: UnitSystem
 }
 
-/** Width of a letter at 11 px, in hundredths of an inspector of 300 px: enough to keep labels apart. */
-const LETTER_WIDTH = 1.95
+/** Width of a letter at 11 px, in hundredths of an inspector of 260 px: enough to keep labels apart. */
+const LETTER_WIDTH = 2.25
 const ROW_PX = 14
 
 function FullWindow({ values, geometry, scale, label, units }: FullWindowProps) {
