@@ -83,9 +83,11 @@ export function Menu({
     const onPointerDown = (event: PointerEvent) => {
       if (event.target instanceof Node && !root.current?.contains(event.target)) setIsOpen(false)
     }
-    // The list does not move with what scrolls under it.
-    const onScroll = (event: Event) => {
-      if (event.target instanceof Node && !list.current?.contains(event.target)) setIsOpen(false)
+    // The list does not move with what scrolls under it; a late event of an earlier scroll changes nothing.
+    const openedAt = trigger.current?.getBoundingClientRect().top ?? 0
+    const onScroll = () => {
+      const top = trigger.current?.getBoundingClientRect().top ?? openedAt
+      if (Math.abs(top - openedAt) > 1) setIsOpen(false)
     }
     document.addEventListener('pointerdown', onPointerDown)
     document.addEventListener('scroll', onScroll, true)

@@ -19,7 +19,7 @@ export function formatNumber(value: number, decimals = decimalsFor(value)): stri
 
 function decimalsFor(value: number): number {
   const size = Math.abs(value)
-  if (size >= 100 || size === 0) return 0
+  if (size >= 100 || size < 0.00005) return 0
   if (size >= 9.995) return 1
   if (size >= 0.0995) return 2
   return size >= 0.00995 ? 3 : 4

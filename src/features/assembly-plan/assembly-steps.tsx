@@ -36,7 +36,7 @@ export function AssemblySteps({ layout, results, units, nameOf }: AssemblyStepsP
     .map(({ id, joining }) => ({ id, side: joining.side, place: null }))
   const degrees = displayUnit('temperature', units).symbol
   return (
-    <div className="overflow-x-auto">
+    <div className="max-sm:overflow-x-auto">
       <table className="w-full border-collapse text-sm">
         <caption className="sr-only">Order of assembly</caption>
         <thead className="sticky top-0 z-10 bg-card">

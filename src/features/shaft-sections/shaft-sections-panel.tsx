@@ -40,7 +40,7 @@ export function ShaftSectionsPanel() {
 
   return (
     <div>
-      <div className="overflow-x-auto">
+      <div className="max-sm:overflow-x-auto">
         <table className="w-full border-collapse text-sm">
           <caption className="sr-only">Shaft sections</caption>
           <thead className="sticky top-0 z-10 bg-card">

@@ -27,6 +27,7 @@ describe('calculated values', () => {
     [9840.2, 'speed', '9 840 rpm'],
     [1.284, 'slope', '1.28 mrad'],
     [-0.001, 'interference', '0.0 µm'],
+    [2e-9, 'stress', '0 MPa'],
     [null, 'stress', '–'],
     [Number.NaN, 'stress', '–'],
   ])('%s as %s', (value, kind, expected) => {
