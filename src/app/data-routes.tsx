@@ -20,6 +20,7 @@ const BenchRoute = lazy(() => import('./routes/bench/bench-route'))
 const CaughtMailRoute = lazy(() => import('./routes/caught-mail/caught-mail-route'))
 const InvitationRoute = lazy(() => import('./routes/invitation/invitation-route'))
 const LayoutsRoute = lazy(() => import('./routes/layouts/layouts-route'))
+const MethodsRoute = lazy(() => import('./routes/methods/methods-route'))
 const PeopleRoute = lazy(() => import('./routes/people/people-route'))
 const ReleaseDeskRoute = lazy(() => import('./routes/releases/release-desk-route'))
 const ReleaseRoute = lazy(() => import('./routes/releases/release-route'))
@@ -39,6 +40,9 @@ export default function DataRoutes() {
             <Route path={paths.home} element={<HomeRoute />} />
             <Route element={<PageFrame />}>
               <Route path={paths.account} element={<AccountRoute />} />
+            </Route>
+            <Route element={<PageFrame showsResults />}>
+              <Route path={paths.methods} element={<MethodsRoute />} />
             </Route>
             <Route element={<WorkspaceFrame />}>
               {/* The bench fills the window and brings its own bar. */}

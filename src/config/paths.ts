@@ -8,6 +8,7 @@ export const paths = {
   confirmEmail: '/confirm-email',
   invitation: (invitationId = ':invitationId') => `/invitation/${invitationId}`,
   account: '/account',
+  methods: '/methods',
   caughtMail: '/caught-mail',
   layouts: (workspaceId = ':workspaceId') => `/w/${workspaceId}/layouts`,
   bench: (workspaceId = ':workspaceId', layoutId = ':layoutId') => `/w/${workspaceId}/layouts/${layoutId}`,

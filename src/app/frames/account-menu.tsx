@@ -41,6 +41,7 @@ export function AccountMenu() {
       items={[
         { kind: 'heading', label: `${user.name}, ${user.email}` },
         { label: 'My account', icon: 'person', onSelect: () => void navigate(paths.account) },
+        { label: 'Methods and checks', icon: 'info', onSelect: () => void navigate(paths.methods) },
         { kind: 'separator' },
         { kind: 'heading', label: 'Theme' },
         ...THEMES.map((option) => ({
