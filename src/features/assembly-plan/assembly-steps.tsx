@@ -39,7 +39,7 @@ export function AssemblySteps({ layout, results, units, nameOf }: AssemblyStepsP
     <div className="max-sm:overflow-x-auto">
       <table className="w-full border-collapse text-sm">
         <caption className="sr-only">Order of assembly</caption>
-        <thead className="sticky top-0 z-10 bg-card">
+        <thead className="top-0 z-10 sm:sticky sm:bg-card">
           <tr>
             <ColumnHead className="pl-0">Step</ColumnHead>
             <ColumnHead>Part</ColumnHead>
@@ -116,7 +116,7 @@ function HubStep({
       <Cell className="py-1! pl-0!">
         <Place place={place} />
       </Cell>
-      <th scope="row" className="border-b border-hairline px-3 py-1 text-left">
+      <th scope="row" className="border-b border-hairline min-w-32 px-3 py-1 text-left">
         <button type="button" className="text-left font-semibold" onClick={select}>
           {hub.name}
         </button>
@@ -204,7 +204,7 @@ function OtherStep({
       <Cell className="py-1! pl-0!">
         <Place place={place} />
       </Cell>
-      <th scope="row" className="border-b border-hairline px-3 py-1.5 text-left">
+      <th scope="row" className="border-b border-hairline min-w-32 px-3 py-1.5 text-left">
         <button type="button" className="text-left font-semibold first-letter:uppercase" onClick={select}>
           {name}
         </button>

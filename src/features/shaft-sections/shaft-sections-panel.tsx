@@ -43,7 +43,7 @@ export function ShaftSectionsPanel() {
       <div className="max-sm:overflow-x-auto">
         <table className="w-full border-collapse text-sm">
           <caption className="sr-only">Shaft sections</caption>
-          <thead className="sticky top-0 z-10 bg-card">
+          <thead className="top-0 z-10 sm:sticky sm:bg-card">
             <tr>
               <ColumnHead>#</ColumnHead>
               <ColumnHead align="right">From z, {mm}</ColumnHead>
