@@ -3,6 +3,7 @@ import { assemblyOrder, type AssemblyOrder } from '../engineering/assembly/assem
 import { passage, type Passage, type ShaftEnd } from '../engineering/assembly/passage'
 import type { LayoutDocument } from '../layout/layout-document'
 import type { SectionSpan } from '../layout/shaft-geometry'
+import { attempt } from './attempt'
 import { assemblyParts, shaftFeatures, type AssemblyPart, type ShaftFeature } from './assembly-parts'
 import type { HubCalculation } from './hub-result'
 import { capitalised, inSentence, millimetreText } from './wording'
@@ -26,13 +27,14 @@ export function calculateAssembly(
   hubs: readonly HubCalculation[],
 ): AssemblyCalculation {
   const features = shaftFeatures(document, spans, hubs)
-  const parts = assemblyParts(document, hubs).map((part) => ({
-    part,
-    ways: {
+  const parts = assemblyParts(document, hubs).flatMap((part) => {
+    const ways = attempt(() => ({
       left: passage(part.travelling, features, 'left'),
       right: passage(part.travelling, features, 'right'),
-    },
-  }))
+    }))
+    // a bore that is no size at all is reported with the hub's missing numbers
+    return ways.value ? [{ part, ways: ways.value }] : []
+  })
   const passing = parts.filter(({ ways }) => ways.left.isFree || ways.right.isFree)
   const order = assemblyOrder(
     passing.map(({ part, ways }) => ({

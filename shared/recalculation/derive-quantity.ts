@@ -12,7 +12,7 @@ import { calculateLayout, type LayoutCalculation } from './recalculate-layout'
  * two can never disagree. A reference to something that is gone is answered in plain words.
  */
 export function deriveQuantity(document: LayoutDocument, reference: QuantityReference): Derivation {
-  const calculation = calculateLayout(document)
+  const calculation = calculationOf(document)
   switch (reference.kind) {
     case 'hub': {
       const hub = hubOf(calculation, reference.hub)
@@ -27,6 +27,18 @@ export function deriveQuantity(document: LayoutDocument, reference: QuantityRefe
     case 'shaft':
       return deriveCriticalSpeed(document, calculation)
   }
+}
+
+/** Documents are never changed in place, so a calculation holds as long as its document lives. */
+const calculations = new WeakMap<LayoutDocument, LayoutCalculation>()
+
+function calculationOf(document: LayoutDocument): LayoutCalculation {
+  let calculation = calculations.get(document)
+  if (!calculation) {
+    calculation = calculateLayout(document)
+    calculations.set(document, calculation)
+  }
+  return calculation
 }
 
 const hubOf = (calculation: LayoutCalculation, id: string) =>

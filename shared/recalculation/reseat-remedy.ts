@@ -3,6 +3,7 @@ import type { Hub, LayoutDocument } from '../layout/layout-document'
 import { sectionSpans, seatUnder } from '../layout/shaft-geometry'
 import { hasAbutment } from './abutment'
 import type { AssemblyPart, ShaftFeature } from './assembly-parts'
+import { attempt } from './attempt'
 import { nextFit, slipSafetyWith } from './next-fit'
 import { resolveSeat } from './seat'
 import { caseState } from './seat-state'
@@ -17,6 +18,11 @@ export function reseatRemedy(
   blocked: AssemblyPart,
   blocker: ShaftFeature,
 ): string | null {
+  // a proposal that cannot be calculated is none
+  return attempt(() => smallerSeat(document, blocked, blocker)).value
+}
+
+function smallerSeat(document: LayoutDocument, blocked: AssemblyPart, blocker: ShaftFeature): string | null {
   const hub = document.hubs.find((one) => one.id === blocker.hubId)
   if (!hub) return null
   const diameterMm = smallerSeatMm(document, blocked, blocker)

@@ -49,9 +49,10 @@ const caseCache = memoise<{ result: ShaftLoadCaseResult | null; reason: string |
 
 export function calculateShaft(document: LayoutDocument, hubs: readonly HubCalculation[]): ShaftCalculation {
   const inputs = shaftInputs(document)
-  const notches = inputs.model ? notchesOf(document, inputs) : []
+  const notched = attempt(() => (inputs.model ? notchesOf(document, inputs) : []))
+  const notches = notched.value ?? []
   const { prepared, reason } = prepareShaft(document, inputs)
-  let failure = reason
+  let failure = reason ?? notched.reason
   const context = prepared && caseContext(document, inputs, hubs, notches, prepared)
   const loadCases = document.loadCases.map((loadCase, index) => {
     const solved = context && solveCase(context, loadCase, index)
