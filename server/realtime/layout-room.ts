@@ -4,20 +4,20 @@
  * says, it says after that.
  */
 import type { Logger } from 'pino'
-import {
-  MAX_CATCH_UP_EDITS,
-  type AcceptedEdit,
-  type JoinReply,
-  type JoinRequest,
-  type PresenceState,
-  type PresenceUpdate,
-  type RejectReason,
-  type SubmitOutcome,
+import type {
+  AcceptedEdit,
+  JoinReply,
+  JoinRequest,
+  PresenceState,
+  PresenceUpdate,
+  RejectReason,
+  SubmitOutcome,
 } from '@shared/protocol/realtime'
 import { can } from '../accounts/policy'
 import { roleIn, type Principal } from '../accounts/principal'
-import type { EditReads, EditStorage, EditTransaction, StoredLayout } from '../edits/edit-storage'
-import { acceptEdit, refusal, type EditResult, type SubmittedEdit } from '../edits/edits.service'
+import type { EditStorage, EditTransaction, StoredLayout } from '../edits/edit-storage'
+import { refusal, type SubmittedEdit } from '../edits/edits.service'
+import { answer, postpone, runEditTurn, type EditJob, type Session, type TurnResult } from './edit-turn'
 import { RecentEntries } from './recent-entries'
 import type { RoomClock } from './room-clock'
 import { accessOf, catchUp } from './room-answers'
@@ -43,31 +43,9 @@ export interface ExclusiveWork<Transaction extends EditTransaction> {
   fail: (error: unknown) => void
 }
 
-interface Session {
-  connectionId: string
-  principal: Principal
-  /**
-   * An edit that could not be stored just now. Until it comes again, later ones of the same
-   * connection are refused too, so that a person's edits keep their order.
-   */
-  stalledEditId: string | null
-}
-
-interface EditJob {
-  kind: 'edit'
-  session: Session
-  edit: SubmittedEdit
-  reply: (outcome: SubmitOutcome) => void
-  isTooFast: boolean
-}
-
 interface ExclusiveJob<Transaction extends EditTransaction> extends ExclusiveWork<Transaction> {
   kind: 'exclusive'
 }
-
-const TRY_AGAIN = refusal('unavailable', 'This could not be stored just now. It will be tried again.')
-
-const TOO_FAST = refusal('rateLimited', 'Too many edits at once. They will be sent again.')
 
 export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
   readonly #sessions = new Map<string, Session>()
@@ -106,7 +84,9 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
       return { ok: false, reason: 'notFound', message: 'This layout does not exist, or you may not see it.' }
     }
     this.parts.transport().enter(connectionId, this.layoutId)
-    this.#sessions.set(connectionId, { connectionId, principal, stalledEditId: null })
+    // Joining again on the same connection, to fetch what is missing, does not free the way.
+    const stalledEditId = this.#sessions.get(connectionId)?.stalledEditId ?? null
+    this.#sessions.set(connectionId, { connectionId, principal, stalledEditId })
     const you = this.#presence.add(connectionId, principal, role)
     this.parts.onListed(this.layout.workspaceId)
     return {
@@ -128,10 +108,6 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
     this.#reportIdle()
   }
 
-  /**
-   * `isTooFast`: the connection is beyond its limit. Such an edit passes through the queue as well,
-   * because only what comes after it has to wait for it, not what still waits before it.
-   */
   submit(
     connectionId: string,
     edit: SubmittedEdit,
@@ -221,51 +197,26 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
   /** All edits of one turn in one transaction: one write to disk for all of them. */
   #runEdits(jobs: EditJob[]): void {
     if (jobs.length === 0) return
-    let results: { job: EditJob; result: EditResult | null }[]
+    let results: TurnResult[]
     try {
-      results = this.parts.storage.transaction((transaction) => {
-        let layout = this.layout
-        const resumed = new Set<string>()
-        const fresh: AcceptedEdit[] = []
-        return jobs.map((job) => {
-          if (isStalled(job, resumed)) return { job, result: null }
-          if (job.isTooFast) {
-            job.session.stalledEditId = job.edit.editId
-            resumed.delete(job.edit.editId)
-            return { job, result: null }
-          }
-          resumed.add(job.edit.editId)
-          const since = this.#entriesSince(job.edit.baseRevision, transaction, fresh)
-          const result = acceptEdit(transaction, layout, job.session.principal, job.edit, since, this.#now())
-          if (result.isNew && 'edit' in result.outcome) fresh.push(result.outcome.edit)
-          layout = result.layout
-          return { job, result }
-        })
-      })
+      results = this.parts.storage.transaction((transaction) =>
+        runEditTurn({
+          transaction,
+          layout: this.layout,
+          jobs,
+          recent: this.#recent,
+          now: this.parts.clock.now(),
+        }),
+      )
     } catch (error) {
       this.#recover(jobs, error)
       return
     }
     for (const { result } of results) if (result) this.layout = result.layout
-    for (const { job, result } of results) this.#answer(job, result)
-  }
-
-  /** What others did since the author looked: committed entries, and those of this turn. */
-  #entriesSince(revision: number, transaction: EditReads, fresh: readonly AcceptedEdit[]): AcceptedEdit[] {
-    if (revision >= this.layout.revision) return fresh.filter((entry) => entry.revision > revision)
-    const from = Math.max(revision, this.layout.revision - MAX_CATCH_UP_EDITS)
-    let committed = this.#recent.since(from)
-    if (!committed) {
-      committed = transaction
-        .readEntries(this.layoutId, from)
-        .filter((entry) => entry.revision <= this.layout.revision)
-      this.#recent.replace(committed)
+    for (const each of results) {
+      answer(each)
+      if (each.result?.isNew) this.#announce(each.job, each.result.outcome)
     }
-    return [...committed, ...fresh]
-  }
-
-  #now(): Date {
-    return this.parts.clock.now()
   }
 
   /** One bad write must not take the others of its turn with it: each gets a transaction of its own. */
@@ -276,25 +227,20 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
     }
     this.parts.logger.error({ err: error, layoutId: this.layoutId }, 'An edit could not be stored')
     this.#reload()
-    for (const job of jobs) {
-      job.session.stalledEditId = job.edit.editId
-      job.reply(TRY_AGAIN)
-    }
+    for (const job of jobs) postpone(job)
   }
 
-  #answer(job: EditJob, result: EditResult | null): void {
-    if (!result) {
-      job.reply(job.isTooFast ? TOO_FAST : TRY_AGAIN)
-      return
-    }
-    if (job.session.stalledEditId === job.edit.editId) job.session.stalledEditId = null
-    const { outcome, isNew } = result
-    job.reply(outcome)
-    if (!isNew) return
-    if (outcome.outcome === 'accepted' || outcome.outcome === 'adjusted') {
-      this.broadcastEntry(outcome.edit, job.session.connectionId)
-    } else if (outcome.outcome === 'noEffect') {
-      this.#tellRemovers(job, outcome.notices)
+  #announce(job: EditJob, outcome: SubmitOutcome): void {
+    switch (outcome.outcome) {
+      case 'accepted':
+      case 'adjusted':
+        this.broadcastEntry(outcome.edit, job.session.connectionId)
+        break
+      case 'noEffect':
+        this.#tellRemovers(job, outcome.notices)
+        break
+      case 'rejected':
+        break
     }
   }
 
@@ -345,10 +291,4 @@ export class LayoutRoom<Transaction extends EditTransaction = EditTransaction> {
   #reportIdle(): void {
     if (this.isIdle) this.parts.onIdle(this)
   }
-}
-
-/** `resumed` holds what this turn takes up again: after that the way is free. */
-function isStalled(job: EditJob, resumed: ReadonlySet<string>): boolean {
-  const { stalledEditId } = job.session
-  return stalledEditId !== null && stalledEditId !== job.edit.editId && !resumed.has(stalledEditId)
 }

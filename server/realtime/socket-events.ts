@@ -28,6 +28,8 @@ export interface SocketEventParts {
 
 export function handleEvents(socket: RealtimeSocket, { rooms, limits, logger }: SocketEventParts): void {
   const principal = () => socket.data.principal
+  /** The limits answer a little later, and not all after the same time: one event after the other keeps their order. */
+  let earlier = Promise.resolve()
 
   on('layout:join', async (payload, answer: (reply: JoinReply) => void) => {
     const refuse = (reason: RejectReason, message: string) => answer({ ok: false, reason, message })
@@ -70,9 +72,11 @@ export function handleEvents(socket: RealtimeSocket, { rooms, limits, logger }: 
     // What arrives is whatever was sent: the typed signature of the event is a hope until it is parsed.
     const listener = (payload: unknown, reply: unknown) => {
       const answer = typeof reply === 'function' ? (reply as (answer: Answer) => void) : () => undefined
-      handle(payload, answer).catch((error: unknown) => {
-        logger.error({ err: error, event, userId: principal().userId }, 'A socket event failed')
-      })
+      earlier = earlier
+        .then(() => handle(payload, answer))
+        .catch((error: unknown) => {
+          logger.error({ err: error, event, userId: principal().userId }, 'A socket event failed')
+        })
     }
     socket.on(event, listener)
   }

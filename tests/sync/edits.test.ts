@@ -9,9 +9,9 @@ async function someoneIn(
   world: SyncWorld,
   name = 'Dina',
   role: Parameters<typeof principalOf>[1] = 'designer',
+  connectionId = `raw-${name}`,
 ) {
   const principal = principalOf(name, role)
-  const connectionId = `raw-${name}`
   const joined = world.rooms.join(connectionId, principal, {
     layoutId: LAYOUT,
     clientId: `client-${name}`,
@@ -276,6 +276,18 @@ describe('the order of one connection', () => {
     expect(await dina.move(11, { clientSeq: 1, editId: 'e1' })).toMatchObject({ outcome: 'accepted' })
     expect(await dina.move(12, { clientSeq: 2, editId: 'e2' })).toMatchObject({ outcome: 'accepted' })
     expect(world.storage.readEntries(LAYOUT, 0).map(({ editId }) => editId)).toEqual(['e1', 'e2'])
+  })
+
+  it('E11 waiting ends when another tab has brought the edit that was waited for', async () => {
+    const world = memoryWorld()
+    const [dina, sameDina] = [
+      await someoneIn(world),
+      await someoneIn(world, 'Dina', 'designer', 'second-tab'),
+    ]
+    world.storage.failures.push('append')
+    expect(await dina.move(11, { clientSeq: 1, editId: 'e1' })).toMatchObject({ reason: 'unavailable' })
+    expect(await sameDina.move(11, { clientSeq: 1, editId: 'e1' })).toMatchObject({ outcome: 'accepted' })
+    expect(await dina.move(12, { clientSeq: 2, editId: 'e2' })).toMatchObject({ outcome: 'accepted' })
   })
 
   it('R10 an edit that came too fast holds up those after it, not those before it', async () => {
