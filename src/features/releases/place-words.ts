@@ -20,3 +20,6 @@ export function fitWords(fit: InterferenceFit): string {
     ? `${fit.hole}/${fit.shaft}`
     : `${fit.minInterferenceUm} to ${fit.maxInterferenceUm} µm`
 }
+
+/** "abutment-missing" read as words. */
+export const codeWords = (code: string): string => code.replaceAll('-', ' ')

@@ -3,7 +3,7 @@ import { TextAreaField } from '@/components/text-area-field'
 import { formatWithUnit } from '@/lib/format-quantity'
 import type { LayoutDocument } from '@shared/layout/layout-document'
 import type { Finding } from '@shared/recalculation/layout-results'
-import { loadCaseName, partName } from '../place-words'
+import { codeWords, loadCaseName, partName } from '../place-words'
 
 /** One failing finding and why it is accepted. */
 export function AcceptanceField({
@@ -46,7 +46,7 @@ export function AcceptanceField({
         <p className="mt-1 text-quiet">{finding.remedy}</p>
       </div>
       <TextAreaField
-        label={`Why ${finding.code} of ${place} is accepted`}
+        label={`Why ${codeWords(finding.code)} of ${place} is accepted`}
         value={reason}
         maxLength={1000}
         error={error}

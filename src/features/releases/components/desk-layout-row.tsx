@@ -41,7 +41,7 @@ export function DeskLayoutRow({
           Open on the bench
         </Link>
       </div>
-      <div className="mt-2 flex flex-wrap gap-x-5 gap-y-1 text-sm">
+      <div className="mt-2 flex flex-wrap items-center gap-x-5 gap-y-1 text-sm">
         {layout.findings.length === 0 ? (
           <span className="inline-flex items-center gap-1.5 font-semibold text-good">
             <Icon name="check" className="size-3.5" />
@@ -49,22 +49,27 @@ export function DeskLayoutRow({
           </span>
         ) : (
           <Disclosure isOpen={opened === 'findings'} panelId={panelId} onToggle={() => toggle('findings')}>
-            {layout.failingCount > 0 ? (
-              <span className="inline-flex items-center gap-1.5 text-bad">
-                <Icon name="cross" className="size-3.5" />
-                {layout.failingCount} {layout.failingCount === 1 ? 'finding fails' : 'findings fail'}
-              </span>
-            ) : (
-              <span className="inline-flex items-center gap-1.5 text-good">
-                <Icon name="check" className="size-3.5" />
-                Passes
-              </span>
-            )}
-            {warnings > 0 && (
-              <span className="text-straw-ink">
-                , {warnings} {warnings === 1 ? 'warning' : 'warnings'}
-              </span>
-            )}
+            <span className="inline-flex flex-wrap items-center gap-x-1.5">
+              {layout.failingCount > 0 ? (
+                <>
+                  <Icon name="cross" className="size-3.5 text-bad" />
+                  <span className="text-bad">
+                    {layout.failingCount} {layout.failingCount === 1 ? 'finding fails' : 'findings fail'}
+                    {warnings > 0 && ','}
+                  </span>
+                </>
+              ) : (
+                <>
+                  <Icon name="check" className="size-3.5 text-good" />
+                  <span className="text-good">Passes{warnings > 0 && ','}</span>
+                </>
+              )}
+              {warnings > 0 && (
+                <span className="text-straw-ink">
+                  {warnings} {warnings === 1 ? 'warning' : 'warnings'}
+                </span>
+              )}
+            </span>
           </Disclosure>
         )}
         {lastReleaseId === null || changeCount === null ? (

@@ -3,6 +3,7 @@ import { Link } from 'react-router'
 import { paths } from '@/config/paths'
 import { formatDate } from '@/lib/format-time'
 import type { ReleaseDesk } from '@shared/protocol/releases'
+import { codeWords } from '../place-words'
 
 export function DeviationList({
   workspaceId,
@@ -20,7 +21,7 @@ export function DeviationList({
         >
           <div className="min-w-0">
             <p className="font-semibold">
-              {deviation.code}: {deviation.partName}
+              {deviation.partName}: {codeWords(deviation.code)}
               {deviation.loadCaseName !== null && `, ${deviation.loadCaseName}`}
             </p>
             <Link to={paths.release(workspaceId, deviation.releaseId)} className="text-quiet hover:underline">

@@ -117,9 +117,8 @@ export function FreezeDialog({
           <ul className="mt-1 list-disc space-y-1 pl-5">
             <li>The server recalculates and stores layout, results, engine version and hash for good.</li>
             <li>
-              The layout can only be read from then on, at once for{' '}
-              {peopleCount > 1 ? `all ${peopleCount} people in it` : 'everyone'}. Edits that arrive later are
-              refused and kept for whoever made them.
+              The layout can only be read from then on, at once for {audienceWords(peopleCount)}. Edits that
+              arrive later are refused and kept for whoever made them.
             </li>
             <li>The release sheet is ready as PDF, and the team gets an e-mail.</li>
           </ul>
@@ -164,6 +163,9 @@ export function FreezeDialog({
     </Dialog>
   )
 }
+
+const audienceWords = (count: number) =>
+  count > 2 ? `all ${count} people in it` : count === 2 ? 'both people in it' : 'everyone'
 
 /** Two findings of one code at one place in one case are accepted together. */
 function failingOnce(findings: readonly Finding[]): Finding[] {

@@ -40,7 +40,7 @@ export function ReleaseCompare({ workspaceId, release }: { workspaceId: string; 
     )
   const other = others.find((each) => each.id === selected)
   return (
-    <div className="grid gap-4">
+    <div className="grid grid-cols-1 gap-4">
       <div className="max-w-xs">
         <SelectField label="Compare with" value={selected} options={options} onValueChange={setChosen} />
       </div>

@@ -42,7 +42,7 @@ export function ReleaseDeskSections({ workspaceId }: { workspaceId: string }) {
       </EmptyState>
     )
   return (
-    <div className="grid gap-10">
+    <div className="grid grid-cols-1 gap-10">
       {total >= SEARCH_FROM && (
         <div className="max-w-sm">
           <TextField

@@ -16,7 +16,7 @@ const SIDE = 24
 const LABEL_BAND = 46
 const BALLOON_RADIUS = 12
 const LEAST_HALF_HEIGHT = 40
-const MOST_HALF_HEIGHT = 190
+const MOST_HALF_HEIGHT = 110
 
 export function ReleaseDrawing({
   document,
@@ -49,7 +49,7 @@ export function ReleaseDrawing({
       role="img"
       aria-label={`Half section of the shaft with ${section.hubs.length} hubs and ${section.bearings.length} bearings`}
       viewBox={`0 0 ${WIDTH} ${axis + half + 8}`}
-      className="block w-full"
+      className="block w-full min-w-2xl"
     >
       <defs>
         {(['rising', 'falling'] as const).map((direction) => (

@@ -32,7 +32,7 @@ export function ReleaseFacts({ release }: { release: Release }) {
         {release.revision}, engine {release.engineVersion}
       </Fact>
       <Fact term="Document hash" isWide>
-        <span className="font-mono text-[13px] break-all">{release.documentHash}</span>
+        <span className="break-all tabular-nums">{release.documentHash}</span>
       </Fact>
       <Fact term="Stored data">
         {release.integrity === 'intact' ? (
@@ -51,7 +51,7 @@ export function ReleaseFacts({ release }: { release: Release }) {
         {release.previousHash === null ? (
           'none, this is the first'
         ) : (
-          <span className="font-mono text-[13px]" title={release.previousHash}>
+          <span className="tabular-nums" title={release.previousHash}>
             {release.previousHash.slice(0, 19)}…
           </span>
         )}

@@ -118,7 +118,7 @@ function LoadedRelease({
           )}
         </div>
       </div>
-      <div className="grid gap-5">
+      <div className="grid grid-cols-1 gap-5">
         {release.integrity === 'broken' && (
           <Banner tone="bad" title="What is stored no longer agrees with its hashes">
             Somebody changed the database behind the program. Do not build from this release; compare with a
@@ -132,7 +132,12 @@ function LoadedRelease({
         )}
         {release.note !== '' && <p className="max-w-prose text-sm wrap-break-word">{release.note}</p>}
         <ReleaseFacts release={release} />
-        <div className="border border-hairline bg-card px-2 py-3">
+        <div
+          className="overflow-x-auto border border-hairline bg-card px-2 py-3"
+          tabIndex={0}
+          role="region"
+          aria-label="Drawing"
+        >
           <ReleaseDrawing document={release.document} results={release.results.hubs} />
         </div>
         <div>

@@ -1,10 +1,12 @@
-/** The stored fit schedule. */
+/** The stored fit schedule: a table, and a list on phones. */
+import type { ReactNode } from 'react'
 import { Cell, ColumnHead, DataTable } from '@/components/data-table'
 import { JudgedNumber, safetyVerdict } from '@/components/judged-number'
 import { InterferenceWindow, WindowSign } from '@/drawings/interference-window'
-import { formatGiven, formatResult, formatResultPair, formatSafety } from '@/lib/format-quantity'
+import { formatResultPair } from '@/lib/format-quantity'
 import type { UnitSystem } from '@/lib/quantity-units'
 import {
+  type WindowScale,
   windowScale,
   windowState,
   windowStateWords,
@@ -13,12 +15,56 @@ import {
 import type { Hub } from '@shared/layout/layout-document'
 import type { HubResult } from '@shared/recalculation/layout-results'
 import type { Release } from '../api/release'
-import { fitWords, loadCaseName } from '../place-words'
+import { type ScheduleTexts, scheduleTexts } from '../schedule-texts'
+
+interface Row {
+  hub: Hub
+  item: number
+  /** Null where the engine of that day gave nothing for the hub. */
+  computed: { result: HubResult; texts: ScheduleTexts } | null
+}
 
 export function ReleaseSchedule({ release, units }: { release: Release; units: UnitSystem }) {
   const { document, results } = release
-  const scale = windowScale(results.hubs.map(windowValuesOf))
   if (document.hubs.length === 0) return <p className="text-sm">The layout has no hubs.</p>
+  const scale = windowScale(results.hubs.map(windowValuesOf))
+  const axis = formatResultPair(scale.fromUm, scale.toUm, 'interference', units, ' to ').text
+  const rows = document.hubs.map((hub, index): Row => {
+    const result = results.hubs.find((each) => each.id === hub.id)
+    return {
+      hub,
+      item: index + 1,
+      computed: result ? { result, texts: scheduleTexts(document, hub, result, units) } : null,
+    }
+  })
+  return (
+    <>
+      <div className="max-md:hidden">
+        <ScheduleTable rows={rows} scale={scale} axis={axis} units={units} />
+      </div>
+      <div className="md:hidden">
+        <p className="pb-1 text-xs text-quiet">All windows from {axis}</p>
+        <ol className="divide-y divide-hairline border-y border-hairline">
+          {rows.map((row) => (
+            <ScheduleEntry key={row.hub.id} row={row} scale={scale} units={units} />
+          ))}
+        </ol>
+      </div>
+    </>
+  )
+}
+
+function ScheduleTable({
+  rows,
+  scale,
+  axis,
+  units,
+}: {
+  rows: readonly Row[]
+  scale: WindowScale
+  axis: string
+  units: UnitSystem
+}) {
   return (
     <DataTable label="Fit schedule">
       <thead>
@@ -27,9 +73,7 @@ export function ReleaseSchedule({ release, units }: { release: Release; units: U
           <ColumnHead>Hub</ColumnHead>
           <ColumnHead>Seat and fit</ColumnHead>
           <ColumnHead>Interference, made</ColumnHead>
-          <ColumnHead className="min-w-56">
-            Window, {formatResultPair(scale.fromUm, scale.toUm, 'interference', units, ' to ').text}
-          </ColumnHead>
+          <ColumnHead className="min-w-56">Window, {axis}</ColumnHead>
           <ColumnHead align="right">Torque held / required</ColumnHead>
           <ColumnHead align="right">Slip safety</ColumnHead>
           <ColumnHead align="right">Hub yield safety</ColumnHead>
@@ -38,94 +82,112 @@ export function ReleaseSchedule({ release, units }: { release: Release; units: U
         </tr>
       </thead>
       <tbody>
-        {document.hubs.map((hub, index) => {
-          const result = results.hubs.find((each) => each.id === hub.id)
-          return (
-            <tr key={hub.id} className="align-top">
-              <Cell align="right" className="font-semibold">
-                {index + 1}
-              </Cell>
-              <Cell className="min-w-40 font-semibold">{hub.name}</Cell>
-              {result ? (
-                <HubCells release={release} hub={hub} result={result} scale={scale} units={units} />
-              ) : (
-                <Cell colSpan={8} className="text-quiet">
-                  not computed
+        {rows.map(({ hub, item, computed }) => (
+          <tr key={hub.id} className="align-top tabular-nums">
+            <Cell align="right" className="font-semibold">
+              {item}
+            </Cell>
+            <Cell className="min-w-40 font-semibold">{hub.name}</Cell>
+            {computed ? (
+              <>
+                <Cell className="whitespace-nowrap">{computed.texts.seat}</Cell>
+                <Cell className="whitespace-nowrap">{computed.texts.interference}</Cell>
+                <Cell>
+                  <HubWindow result={computed.result} scale={scale} units={units} />
                 </Cell>
-              )}
-            </tr>
-          )
-        })}
+                <Cell align="right" className="whitespace-nowrap">
+                  {computed.texts.torque}
+                </Cell>
+                <Cell align="right" className="min-w-32">
+                  <SlipSafety hub={hub} slip={computed.texts.slip} />
+                  <span className="block text-xs text-quiet">{computed.texts.slip.note}</span>
+                </Cell>
+                <Cell align="right">{computed.texts.hubYield}</Cell>
+                <Cell className="whitespace-nowrap">{computed.texts.joining}</Cell>
+                <Cell className="whitespace-nowrap">{computed.texts.order}</Cell>
+              </>
+            ) : (
+              <Cell colSpan={8} className="text-quiet">
+                not computed
+              </Cell>
+            )}
+          </tr>
+        ))}
       </tbody>
     </DataTable>
   )
 }
 
-function HubCells({
-  release,
-  hub,
-  result,
+function ScheduleEntry({
+  row: { hub, item, computed },
   scale,
   units,
 }: {
-  release: Release
-  hub: Hub
-  result: HubResult
-  scale: ReturnType<typeof windowScale>
+  row: Row
+  scale: WindowScale
   units: UnitSystem
 }) {
-  const values = windowValuesOf(result)
-  const governing = result.loadCases.find((each) => each.loadCase === result.governingLoadCase)
-  const hubSafeties = [result.atRest.hubYieldSafety, ...result.loadCases.map((each) => each.hubYieldSafety)]
-  const knownSafeties = hubSafeties.filter((value) => value !== null)
-  const slip = governing?.slipSafety ?? null
-  const limit = governing?.slipSafetyLimit ?? null
+  return (
+    <li className="py-3 text-sm">
+      <p className="font-semibold">
+        {item}. {hub.name}
+      </p>
+      {computed ? (
+        <>
+          <p className="tabular-nums">
+            {computed.texts.seat}, {computed.texts.interference}
+          </p>
+          <div className="py-1.5">
+            <HubWindow result={computed.result} scale={scale} units={units} />
+          </div>
+          <dl className="grid grid-cols-[auto_1fr] gap-x-4 gap-y-0.5 tabular-nums">
+            <Pair term="Slip safety">
+              <SlipSafety hub={hub} slip={computed.texts.slip} />
+              {computed.texts.slip.note !== '' && (
+                <span className="text-quiet"> {computed.texts.slip.note}</span>
+              )}
+            </Pair>
+            <Pair term="Torque held / required">{computed.texts.torque}</Pair>
+            <Pair term="Hub yield safety">{computed.texts.hubYield}</Pair>
+            <Pair term="Joining">{computed.texts.joining}</Pair>
+            <Pair term="Order, side">{computed.texts.order}</Pair>
+          </dl>
+        </>
+      ) : (
+        <p className="text-quiet">not computed</p>
+      )}
+    </li>
+  )
+}
+
+function Pair({ term, children }: { term: string; children: ReactNode }) {
   return (
     <>
-      <Cell className="whitespace-nowrap tabular-nums">
-        ⌀{formatGiven(result.seat.diameterMm, 'length', units).text} {fitWords(hub.fit)}
-      </Cell>
-      <Cell className="whitespace-nowrap tabular-nums">
-        {formatResultPair(values.minUm, values.maxUm, 'interference', units, ' to ').text}
-      </Cell>
-      <Cell>
-        <InterferenceWindow values={values} size="row" units={units} scale={scale} />
-        <span className="mt-1 flex items-center gap-1 text-xs">
-          <WindowSign state={windowState(values)} />
-          {windowStateWords(values)}
-        </span>
-      </Cell>
-      <Cell align="right" className="whitespace-nowrap tabular-nums">
-        {governing
-          ? formatResultPair(governing.torqueCapacityNm, governing.requiredTorqueNm, 'torque', units).text
-          : 'no demand'}
-      </Cell>
-      <Cell align="right" className="tabular-nums">
-        <JudgedNumber
-          text={formatSafety(slip, limit)}
-          verdict={safetyVerdict(slip, limit)}
-          label={`slip safety of ${hub.name}`}
-        />
-        {governing && (
-          <span className="block text-xs text-quiet">
-            {limit !== null && `at least ${formatSafety(limit)}, `}
-            {loadCaseName(release.document, governing.loadCase)}
-          </span>
-        )}
-      </Cell>
-      <Cell align="right" className="tabular-nums">
-        {formatSafety(knownSafeties.length === 0 ? null : Math.min(...knownSafeties))}
-      </Cell>
-      <Cell className="whitespace-nowrap tabular-nums">
-        {hub.joining.method === 'press'
-          ? `press, ${formatResult(result.assembly.pressForceMaxN, 'force', units).text}`
-          : `oven ${formatResult(result.assembly.ovenC, 'temperature', units).text}`}
-      </Cell>
-      <Cell className="whitespace-nowrap">
-        {result.assembly.order === null
-          ? 'cannot be mounted'
-          : `${result.assembly.order}, ${result.assembly.side}`}
-      </Cell>
+      <dt className="text-quiet">{term}</dt>
+      <dd>{children}</dd>
+    </>
+  )
+}
+
+function SlipSafety({ hub, slip }: { hub: Hub; slip: ScheduleTexts['slip'] }) {
+  return (
+    <JudgedNumber
+      text={slip.text}
+      verdict={safetyVerdict(slip.value, slip.limit)}
+      label={`slip safety of ${hub.name}`}
+    />
+  )
+}
+
+function HubWindow({ result, scale, units }: { result: HubResult; scale: WindowScale; units: UnitSystem }) {
+  const values = windowValuesOf(result)
+  return (
+    <>
+      <InterferenceWindow values={values} size="row" units={units} scale={scale} />
+      <span className="mt-1 flex items-center gap-1 text-xs">
+        <WindowSign state={windowState(values)} />
+        {windowStateWords(values)}
+      </span>
     </>
   )
 }

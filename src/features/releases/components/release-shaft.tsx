@@ -14,7 +14,7 @@ export function ReleaseShaft({ release, units }: { release: Release; units: Unit
   if (results.shaft.loadCases.length === 0)
     return <p className="text-sm">There are no results of the shaft: no load case, or no support.</p>
   return (
-    <div className="grid gap-6">
+    <div className="grid grid-cols-1 gap-6">
       <p className="text-sm">
         {critical === undefined
           ? 'Lateral critical speeds are not computed.'
