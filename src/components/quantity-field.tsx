@@ -19,6 +19,8 @@ export interface QuantityFieldProps {
   /** The typed text was given up; the preview goes too. */
   onCancel?: () => void
   onFocusChange?: (isFocused: boolean) => void
+  /** Keys pressed while nothing is typed: what the field does not use itself. */
+  onIdleKeyDown?: (event: KeyboardEvent) => void
   /** `stacked`: label above. `row`: label left, value right. `cell`: in a table, label only read out. */
   arrangement?: 'stacked' | 'row' | 'cell'
   min?: number
@@ -172,6 +174,8 @@ export function QuantityField(props: QuantityFieldProps) {
       event.preventDefault()
       event.stopPropagation()
       nudge(event.key === 'ArrowUp' ? 1 : -1, event)
+    } else if (draft === null) {
+      props.onIdleKeyDown?.(event)
     }
   }
 

@@ -2,7 +2,7 @@
  * Ties one field to one value of the open layout: reads whether it may be edited and who else is
  * typing in it, previews and commits through the session, reports the own focus as presence.
  */
-import { useRef } from 'react'
+import { type KeyboardEvent, useRef } from 'react'
 import { useShallow } from 'zustand/react/shallow'
 import { useLayoutSession } from '@/lib/layout-session-context'
 import { useLayoutStore } from '@/stores/layout-store'
@@ -34,6 +34,8 @@ export interface LayoutField {
   commit: (value: unknown) => string | null
   cancel: () => void
   setFocused: (isFocused: boolean) => void
+  /** For keys while nothing is typed: undo and redo then mean the layout, not the text. */
+  onIdleKeyDown: (event: KeyboardEvent) => void
 }
 
 /** `hub:A:lengthMm`, `load:run:load-1:torqueNm`: how presence names a field. */
@@ -141,6 +143,15 @@ export function useLayoutField(address: FieldAddress): LayoutField {
       if (seen.current === null) return
       seen.current = null
       session.clearPreview()
+    },
+    onIdleKeyDown: (event) => {
+      if (!(event.ctrlKey || event.metaKey) || event.altKey) return
+      const key = event.key.toLowerCase()
+      if (key !== 'z' && key !== 'y') return
+      event.preventDefault()
+      event.stopPropagation()
+      if (key === 'y' || event.shiftKey) session.redo()
+      else session.undo()
     },
     setFocused: (isFocused) => session.updatePresence({ editing: isFocused && canEdit ? key : null }),
   }

@@ -4,7 +4,7 @@ import { type FieldAddress, shownValues, useLayoutField } from './layout-field'
 
 interface LayoutQuantityFieldProps extends Omit<
   QuantityFieldProps,
-  'value' | 'onCommit' | 'onPreview' | 'onCancel' | 'onFocusChange' | 'badge' | 'draftKey'
+  'value' | 'onCommit' | 'onPreview' | 'onCancel' | 'onFocusChange' | 'onIdleKeyDown' | 'badge' | 'draftKey'
 > {
   address: FieldAddress
 }
@@ -28,6 +28,7 @@ export function LayoutQuantityField({ address, placeholder, ...rest }: LayoutQua
       onPreview={field.preview}
       onCancel={field.cancel}
       onFocusChange={field.setFocused}
+      onIdleKeyDown={field.onIdleKeyDown}
     />
   )
 }

@@ -67,6 +67,7 @@ export function LayoutTextField({
   }
   const onKeyDown = (event: KeyboardEvent) => {
     if (event.key === 'Enter') commit()
+    if (draft === null) field.onIdleKeyDown(event)
     if (event.key !== 'Escape' || draft === null) return
     event.preventDefault()
     event.stopPropagation()

@@ -102,6 +102,17 @@ describe('a field of a hub', () => {
     expect(hub(bench, 'A')?.stationMm).toBe(83)
   })
 
+  it('undoes the last edit when nothing is typed, and leaves undo to the text while something is', async () => {
+    const user = userEvent.setup()
+    const bench = inspect('A')
+    await user.clear(field('Length'))
+    await user.type(field('Length'), '64')
+    await user.keyboard('{Control>}z{/Control}')
+    expect(bench.history).toEqual([])
+    await user.keyboard('{Enter}{Control>}z{/Control}{Control>}{Shift>}z{/Shift}{/Control}')
+    expect(bench.history).toEqual(['undo', 'redo'])
+  })
+
   it('commits nothing when the value is the same', async () => {
     const user = userEvent.setup()
     const bench = inspect('A')

@@ -51,6 +51,8 @@ export interface PanelBench {
   previews: Operation[][]
   /** What presence said is being edited, in order. */
   editing: (string | null)[]
+  /** Undo and redo asked for, in order. */
+  history: ('undo' | 'redo')[]
   layout: () => LayoutDocument
 }
 
@@ -61,7 +63,7 @@ export function renderPanel(
   let current = document
   // Texts kept off screen belong to a layout: each test opens another one.
   const layoutId = `layout-${(opened += 1)}`
-  const bench: PanelBench = { commits: [], previews: [], editing: [], layout: () => current }
+  const bench: PanelBench = { commits: [], previews: [], editing: [], history: [], layout: () => current }
   const show = (visible: LayoutDocument) =>
     act(() => {
       useLayoutStore.setState({ visible })
@@ -84,8 +86,14 @@ export function renderPanel(
       show(applyOperations(current, operations).document)
     },
     clearPreview: () => show(current),
-    undo: () => ({ kind: 'nothing' }),
-    redo: () => ({ kind: 'nothing' }),
+    undo: () => {
+      bench.history.push('undo')
+      return { kind: 'nothing' }
+    },
+    redo: () => {
+      bench.history.push('redo')
+      return { kind: 'nothing' }
+    },
     updatePresence: ({ editing }) => {
       if (editing !== undefined) bench.editing.push(editing)
     },
