@@ -4,7 +4,7 @@ import { queryKeys } from '@/lib/query-keys'
 import { type ReleaseView, releaseViewSchema } from '@shared/protocol/releases'
 import type { LayoutResults } from '@shared/recalculation/layout-results'
 
-export interface Release extends ReleaseView {
+export interface ReleaseDetails extends ReleaseView {
   results: LayoutResults
 }
 
@@ -12,7 +12,7 @@ export interface Release extends ReleaseView {
 export const releaseQuery = (releaseId: string) =>
   queryOptions({
     queryKey: queryKeys.release(releaseId),
-    queryFn: async ({ signal }): Promise<Release> => {
+    queryFn: async ({ signal }): Promise<ReleaseDetails> => {
       const view = await request(`/api/releases/${releaseId}`, { schema: releaseViewSchema, signal })
       // Written by the server's own engine and covered by the release hash.
       return { ...view, results: view.results as LayoutResults }

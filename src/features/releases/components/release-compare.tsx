@@ -9,12 +9,12 @@ import { compareLayouts } from '@shared/comparison/compare-layouts'
 import type { ReleaseSummary } from '@shared/protocol/releases'
 import { layoutReleasesQuery } from '../api/layout-releases'
 import { layoutViewQuery } from '../api/layout-view'
-import { type Release, releaseQuery } from '../api/release'
+import { type ReleaseDetails, releaseQuery } from '../api/release'
 import { ChangeList } from './change-list'
 
 const NOW = 'now'
 
-export function ReleaseCompare({ workspaceId, release }: { workspaceId: string; release: Release }) {
+export function ReleaseCompare({ workspaceId, release }: { workspaceId: string; release: ReleaseDetails }) {
   const releases = useQuery(layoutReleasesQuery(workspaceId, release.layoutId))
   const [chosen, setChosen] = useState<string | null>(null)
   if (releases.isPending) return <Spinner label="Loading the other releases" />
@@ -49,7 +49,7 @@ export function ReleaseCompare({ workspaceId, release }: { workspaceId: string; 
   )
 }
 
-function AgainstRelease({ release, other }: { release: Release; other: ReleaseSummary }) {
+function AgainstRelease({ release, other }: { release: ReleaseDetails; other: ReleaseSummary }) {
   const query = useQuery(releaseQuery(other.id))
   if (query.isPending) return <Spinner label="Comparing" />
   if (!query.data)
@@ -71,7 +71,7 @@ function AgainstRelease({ release, other }: { release: Release; other: ReleaseSu
   )
 }
 
-function AgainstDraft({ release }: { release: Release }) {
+function AgainstDraft({ release }: { release: ReleaseDetails }) {
   const layout = useQuery({ ...layoutViewQuery(release.layoutId, 0), staleTime: 0 })
   if (layout.isPending) return <Spinner label="Comparing" />
   if (!layout.data)

@@ -2,9 +2,9 @@
 import type { ReactNode } from 'react'
 import { Sign } from '@/components/sign'
 import { formatDateTime } from '@/lib/format-time'
-import type { Release } from '../api/release'
+import type { ReleaseDetails } from '../api/release'
 
-export function ReleaseFacts({ release }: { release: Release }) {
+export function ReleaseFacts({ release }: { release: ReleaseDetails }) {
   return (
     <dl className="grid border-t border-l border-hairline text-sm sm:grid-cols-2 lg:grid-cols-4">
       <Fact term="Verdict">

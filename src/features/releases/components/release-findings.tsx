@@ -3,7 +3,7 @@ import { Sign } from '@/components/sign'
 import { formatWithUnit } from '@/lib/format-quantity'
 import { findingKey } from '@shared/protocol/releases'
 import type { Severity } from '@shared/recalculation/layout-results'
-import type { Release } from '../api/release'
+import type { ReleaseDetails } from '../api/release'
 import { loadCaseName, partName } from '../place-words'
 
 const SEVERITIES = {
@@ -13,7 +13,7 @@ const SEVERITIES = {
 } as const satisfies Record<Severity, object>
 const ORDER: Severity[] = ['fails', 'warns', 'notes']
 
-export function ReleaseFindings({ release }: { release: Release }) {
+export function ReleaseFindings({ release }: { release: ReleaseDetails }) {
   const { document, results, acceptances } = release
   const reasons = new Map(acceptances.map((acceptance) => [findingKey(acceptance), acceptance.reason]))
   const findings = ORDER.flatMap((severity) =>

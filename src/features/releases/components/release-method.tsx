@@ -1,7 +1,7 @@
 /** How the stored results were computed, and what the model of that day left out. */
-import type { Release } from '../api/release'
+import type { ReleaseDetails } from '../api/release'
 
-export function ReleaseMethod({ release }: { release: Release }) {
+export function ReleaseMethod({ release }: { release: ReleaseDetails }) {
   const { method, results, engineVersion } = release
   return (
     <div className="grid max-w-4xl gap-6 text-sm">

@@ -13,7 +13,7 @@ import { formatDateTime } from '@/lib/format-time'
 import { HttpError, messageOf } from '@/lib/http-client'
 import { usePreferencesStore } from '@/stores/preferences-store'
 import { type Role, roleCovers } from '@shared/protocol/roles'
-import { type Release, releaseQuery } from '../api/release'
+import { type ReleaseDetails, releaseQuery } from '../api/release'
 import { DocumentButton } from './document-button'
 import { NextRevisionDialog } from './next-revision-dialog'
 import { ReleaseCompare } from './release-compare'
@@ -71,7 +71,7 @@ function LoadedRelease({
   role,
 }: {
   workspaceId: string
-  release: Release
+  release: ReleaseDetails
   role: Role
 }) {
   const units = usePreferencesStore((state) => state.units)

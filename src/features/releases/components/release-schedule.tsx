@@ -14,7 +14,7 @@ import {
 } from '@shared/drawing/interference-window-geometry'
 import type { Hub } from '@shared/layout/layout-document'
 import type { HubResult } from '@shared/recalculation/layout-results'
-import type { Release } from '../api/release'
+import type { ReleaseDetails } from '../api/release'
 import { type ScheduleTexts, scheduleTexts } from '../schedule-texts'
 
 interface Row {
@@ -24,7 +24,7 @@ interface Row {
   computed: { result: HubResult; texts: ScheduleTexts } | null
 }
 
-export function ReleaseSchedule({ release, units }: { release: Release; units: UnitSystem }) {
+export function ReleaseSchedule({ release, units }: { release: ReleaseDetails; units: UnitSystem }) {
   const { document, results } = release
   if (document.hubs.length === 0) return <p className="text-sm">The layout has no hubs.</p>
   const scale = windowScale(results.hubs.map(windowValuesOf))

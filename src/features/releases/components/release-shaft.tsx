@@ -3,10 +3,10 @@ import { Cell, ColumnHead, DataTable } from '@/components/data-table'
 import { formatGiven, formatResult, formatSafety } from '@/lib/format-quantity'
 import type { UnitSystem } from '@/lib/quantity-units'
 import type { StationValue } from '@shared/recalculation/layout-results'
-import type { Release } from '../api/release'
+import type { ReleaseDetails } from '../api/release'
 import { loadCaseName, partName } from '../place-words'
 
-export function ReleaseShaft({ release, units }: { release: Release; units: UnitSystem }) {
+export function ReleaseShaft({ release, units }: { release: ReleaseDetails; units: UnitSystem }) {
   const { document, results } = release
   const [critical] = results.shaft.lateralCriticalRpm
   const at = (found: StationValue | null) =>
