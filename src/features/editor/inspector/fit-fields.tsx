@@ -150,7 +150,7 @@ function IsoClasses({
   )
 }
 
-/** Where the present fit lies outside the window: one press for the loosest one of its grade inside. */
+/** Where the present fit lies outside the window: one press for the loosest one inside. */
 function TakeFit({
   hub,
   fit,
@@ -167,8 +167,7 @@ function TakeFit({
   const hasWindow = window.requiredUm !== null || window.permissibleUm !== null
   if (field.isReadOnly || !hasWindow || (present !== undefined && windowMargin(present, window) >= 0))
     return null
-  const grade = fit.shaft.replace(/^\D+/, '')
-  const better = fits.find((other) => other.shaft.endsWith(grade) && windowMargin(other, window) >= 0)
+  const better = looserFitInside(fit, sizeMm, window)
   if (better === undefined) return null
   return (
     <Button
@@ -180,6 +179,24 @@ function TakeFit({
       {formatResultPair(better.minUm, better.maxUm, 'interference', units, ' … ').text}
     </Button>
   )
+}
+
+/** The grades chosen first, then one and two grades finer on both sides when the band is too wide. */
+function looserFitInside(
+  { hole, shaft }: { hole: string; shaft: string },
+  sizeMm: number,
+  window: FitFieldsProps['window'],
+): FitOfClass | undefined {
+  const gradeOf = (name: string) => Number(/\d+$/.exec(name)?.[0])
+  for (const finer of [0, 1, 2]) {
+    const holeClass = hole.replace(/\d+$/, '') + (gradeOf(hole) - finer)
+    const grade = String(gradeOf(shaft) - finer)
+    const inside = interferenceFits(sizeMm, holeClass).find(
+      (other) => other.shaft.replace(/^\D+/, '') === grade && windowMargin(other, window) >= 0,
+    )
+    if (inside !== undefined) return inside
+  }
+  return undefined
 }
 
 /** Deviations of both classes, the way a drawing gives them. */
