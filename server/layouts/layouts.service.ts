@@ -18,6 +18,7 @@ import { type Principal, roleIn } from '../accounts/principal'
 import type { AppDatabase } from '../database/open-database'
 import type { StartingExample } from '../demo/layout-data'
 import { HttpError, notFound } from '../http/http-error'
+import { safeFileName } from '../http/safe-file-name'
 import type { LayoutRooms } from '../realtime/layout-rooms'
 import { type CalculatedSummary, summarise, thumbnailOf } from './layout-summary'
 import {
@@ -202,7 +203,7 @@ export function createLayoutsService(
       const layout = readable(principal, layoutId)
       assertCan(principal, 'layout:export', layout)
       return {
-        fileName: `${fileNameFor(layout.document.name)}.layout.json`,
+        fileName: `${safeFileName(layout.document.name)}.layout.json`,
         content: serialiseLayoutFile(layout.document),
       }
     },
@@ -227,15 +228,4 @@ export function documentFromFile(content: unknown): LayoutDocument {
   const fields: Record<string, string> = {}
   for (const { path, message } of parsed.problems) fields[path] ??= message
   throw new HttpError('bad-request', 'This layout file is not usable.', fields)
-}
-
-/** Letters and digits only: a file name must not mean anything to a shell or a browser. */
-function fileNameFor(name: string): string {
-  const safe = name
-    .normalize('NFKD')
-    .replace(/\p{M}/gu, '')
-    .replace(/[^A-Za-z0-9]+/g, '-')
-    .replace(/^-+|-+$/g, '')
-    .slice(0, 80)
-  return safe || 'layout'
 }

@@ -2,7 +2,6 @@
  * Review, freeze, withdraw, next revision. Each goes through the queue of the layout's room and one
  * transaction together with its log entry, so that every edit is either in a release or refused.
  */
-import { randomUUID } from 'node:crypto'
 import { canonicalJson } from '@shared/layout/canonical-json'
 import { compareLayouts } from '@shared/comparison/compare-layouts'
 import type { LayoutSummary } from '@shared/protocol/layouts'
@@ -18,24 +17,21 @@ import { inputHash } from '@shared/recalculation/input-hash'
 import { recalculateLayout } from '@shared/recalculation/recalculate-layout'
 import { assertCan } from '../accounts/policy'
 import type { Principal } from '../accounts/principal'
-import type { AppDatabase, WriteTransaction } from '../database/open-database'
-import type { StoredLayout } from '../edits/edit-storage'
+import type { AppDatabase } from '../database/open-database'
 import type { SqliteEditTransaction } from '../edits/edits.repository'
-import { conflict, HttpError, notFound } from '../http/http-error'
+import { conflict, notFound } from '../http/http-error'
+import { safeFileName } from '../http/safe-file-name'
 import type { LayoutsService } from '../layouts/layouts.service'
 import type { LayoutRooms } from '../realtime/layout-rooms'
 import { drawReleaseSheet } from '../sheets/release-sheet'
-import { checkAcceptances } from './check-acceptances'
-import { METHOD_NOTES } from './method-notes'
 import type { ReleaseMails } from './release-mails'
-import { hashRelease, isIntact } from './release-hash'
-import type { ReleaseContent, StoredRelease } from './release-storage'
+import { isIntact } from './release-hash'
+import type { StoredRelease } from './release-storage'
 import { deskFindings, deviationsOf, sheetOfRelease, summaryOfRelease, viewOfRelease } from './release-words'
 import {
   findRelease,
   findReviewedLayout,
   hashBefore,
-  insertRelease,
   insertWithdrawal,
   latestRelease,
   layoutsInReview,
@@ -45,6 +41,7 @@ import {
   type ReviewedLayout,
   setLayoutStatus,
 } from './releases.repository'
+import { storeRelease } from './store-release'
 
 export interface ReleasesService {
   desk(principal: Principal, workspaceId: string): ReleaseDesk
@@ -58,6 +55,9 @@ export interface ReleasesService {
   withdraw(principal: Principal, releaseId: string, reason: string): Promise<ReleaseSummary>
   nextRevision(principal: Principal, layoutId: string): Promise<LayoutSummary>
 }
+
+/** A sheet is about 100 kB and half a second of work. */
+const MAX_KEPT_SHEETS = 20
 
 export interface ReleasesParts {
   database: AppDatabase
@@ -74,6 +74,8 @@ export function createReleasesService({
   mails,
   now = () => new Date(),
 }: ReleasesParts): ReleasesService {
+  const sheets = new Map<string, Promise<Buffer>>()
+
   function storedLayout(layoutId: string): ReviewedLayout {
     const layout = findReviewedLayout(database, layoutId)
     if (!layout) throw notFound()
@@ -85,6 +87,22 @@ export function createReleasesService({
     if (!release) throw notFound()
     assertCan(principal, 'release:read', { workspaceId: release.workspaceId })
     return release
+  }
+
+  /** A release and its withdrawal never change, so neither does its sheet. */
+  function drawnSheet(release: StoredRelease): Promise<Buffer> {
+    const key = `${release.id} ${release.withdrawal?.withdrawnAt ?? ''}`
+    const kept = sheets.get(key)
+    if (kept) return kept
+    const drawn = drawReleaseSheet(sheetOfRelease(release))
+    // A failure is not kept: the next request tries again.
+    drawn.catch(() => sheets.delete(key))
+    if (sheets.size >= MAX_KEPT_SHEETS) {
+      const [oldest] = sheets.keys()
+      if (oldest !== undefined) sheets.delete(oldest)
+    }
+    sheets.set(key, drawn)
+    return drawn
   }
 
   function deskLayout(layout: ReviewedLayout): DeskLayout {
@@ -103,59 +121,6 @@ export function createReleasesService({
       lastReleaseLetter: last?.revisionLetter ?? null,
       changeCount: last ? compareLayouts(last.document, layout.document).length : null,
     }
-  }
-
-  /** Runs inside the transaction of the log entry; throwing stores nothing. */
-  function storeRelease(
-    transaction: WriteTransaction,
-    layout: StoredLayout,
-    principal: Principal,
-    body: FreezeBody,
-  ): StoredRelease {
-    const results = recalculateLayout(layout.document)
-    const { missing, unknown } = checkAcceptances(results.findings, body.acceptances)
-    if (Object.keys(unknown).length > 0)
-      throw new HttpError('bad-request', 'A reason is given for something that does not fail.', unknown)
-    const missingCount = Object.keys(missing).length
-    if (missingCount > 0)
-      throw new HttpError(
-        'fails',
-        missingCount === 1
-          ? 'One finding fails and is not accepted.'
-          : `${missingCount} findings fail and are not accepted.`,
-        missing,
-      )
-    const about = findReviewedLayout(transaction, layout.layoutId)
-    if (!about) throw notFound()
-    const previous = latestRelease(transaction, layout.layoutId)
-    const content: ReleaseContent = {
-      id: randomUUID(),
-      workspaceId: layout.workspaceId,
-      workspaceName: about.workspaceName,
-      layoutId: layout.layoutId,
-      layoutName: layout.document.name,
-      sequence: (previous?.sequence ?? 0) + 1,
-      revisionLetter: layout.revisionLetter,
-      revision: layout.revision,
-      document: layout.document,
-      documentHash: inputHash(layout.document),
-      results,
-      engineVersion: results.engineVersion,
-      method: METHOD_NOTES,
-      verdict: results.verdict,
-      acceptances: body.acceptances,
-      note: body.note ?? '',
-      reviewAskedByName: about.reviewAskedByName,
-      reviewAskedAt: about.reviewAskedAt,
-      frozenBy: principal.userId,
-      frozenByName: principal.name,
-      frozenAt: now().toISOString(),
-      previousHash: previous?.releaseHash ?? null,
-    }
-    const release = { ...content, releaseHash: hashRelease(content), withdrawal: null }
-    insertRelease(transaction, release)
-    setLayoutStatus(transaction, layout.layoutId, { status: 'released' })
-    return release
   }
 
   return {
@@ -191,7 +156,7 @@ export function createReleasesService({
       const release = readableRelease(principal, releaseId)
       return {
         fileName: `${fileNameOf(release)}.pdf`,
-        content: await drawReleaseSheet(sheetOfRelease(release)),
+        content: await drawnSheet(release),
       }
     },
 
@@ -245,7 +210,7 @@ export function createReleasesService({
         expectedRevision: body.revision,
         apply: ({ transaction, layout }) => {
           assertCan(principal, 'layout:freeze', layout)
-          return storeRelease(transaction.sql, layout, principal, body)
+          return storeRelease(transaction.sql, layout, principal, body, now())
         },
       })
       mails.frozen(release)
@@ -307,12 +272,5 @@ export function createReleasesService({
   }
 }
 
-/** Letters and digits only: a file name must not mean anything to a shell or a browser. */
-function fileNameOf(release: StoredRelease): string {
-  const safe = release.layoutName
-    .normalize('NFKD')
-    .replace(/[^A-Za-z0-9]+/g, '-')
-    .replace(/^-+|-+$/g, '')
-    .slice(0, 80)
-  return `${safe || 'layout'}-revision-${release.revisionLetter}`
-}
+const fileNameOf = (release: StoredRelease) =>
+  `${safeFileName(release.layoutName)}-revision-${release.revisionLetter}`
