@@ -3,6 +3,7 @@ import { type ReactNode, useCallback, useState } from 'react'
 import type { LayoutDocument } from '@shared/layout/layout-document'
 import { useLayoutSession } from '@/lib/layout-session-context'
 import type { ViewTransform } from '@/lib/view-transform'
+import { useLayoutStore } from '@/stores/layout-store'
 import { useBenchActions } from './bench-actions'
 import { LayoutCanvas } from './canvas/layout-canvas'
 import { PartMenu } from './toolbar/part-menu'
@@ -52,6 +53,7 @@ export function Drawing({ document, viewExtras, letsPageScroll = false, overlay 
           {overlay?.({ view, extentOf })}
         </LayoutCanvas>
         <ToolList />
+        {document.shaft.sections.length === 0 && <EmptyShaft />}
         {menuPlace && <PartMenu place={menuPlace} onClose={closeMenu} />}
       </div>
       <div className="flex h-9 shrink-0 items-center gap-3 border-t border-hairline pr-1 pl-3">
@@ -59,5 +61,16 @@ export function Drawing({ document, viewExtras, letsPageScroll = false, overlay 
         <ViewControls>{viewExtras}</ViewControls>
       </div>
     </div>
+  )
+}
+
+function EmptyShaft() {
+  const canEdit = useLayoutStore((state) => state.access?.canEdit ?? false)
+  return (
+    <p className="pointer-events-none absolute inset-x-32 top-1/4 text-center text-sm text-quiet">
+      {canEdit
+        ? 'There is no shaft yet. Take the section tool (S) and draw its first section to the right of station 0.'
+        : 'There is no shaft yet.'}
+    </p>
   )
 }

@@ -2,7 +2,9 @@
 import { create } from 'zustand'
 import {
   type DrawingBounds,
+  heightToPx,
   panBy,
+  stationToPx,
   type ViewMargins,
   type ViewTransform,
   zoomAt,
@@ -24,6 +26,17 @@ export function drawingMargins(widthPx: number, heightPx: number): ViewMargins {
   }
 }
 
+/** True while the bounds keep at least half of their margins. */
+function isInSight(bounds: DrawingBounds, view: ViewTransform, widthPx: number, heightPx: number): boolean {
+  const margins = drawingMargins(widthPx, heightPx)
+  return (
+    stationToPx(view, bounds.leftMm) >= margins.left / 2 &&
+    stationToPx(view, bounds.rightMm) <= widthPx - margins.right / 2 &&
+    heightToPx(view, bounds.radiusMm) >= margins.top / 2 &&
+    heightToPx(view, -bounds.radiusMm) <= heightPx - margins.bottom / 2
+  )
+}
+
 interface ViewState {
   view: ViewTransform
   widthPx: number
@@ -33,7 +46,10 @@ interface ViewState {
   bounds: DrawingBounds | null
   hoverStationMm: number | null
   resize: (widthPx: number, heightPx: number) => void
-  /** Says what "the whole shaft" is. It does not move the drawing while somebody works in it. */
+  /**
+   * Says what "the whole shaft" is. It does not move the drawing under somebody's hand, unless the
+   * shaft has outgrown a drawing that was to show it whole.
+   */
   setBounds: (bounds: DrawingBounds) => void
   showWhole: () => void
   pan: (dxPx: number, dyPx: number) => void
@@ -59,9 +75,9 @@ export const useViewStore = create<ViewState>()((set, get) => ({
     if (isWhole) get().showWhole()
   },
   setBounds: (bounds) => {
-    const isFirst = get().bounds === null
+    const { bounds: before, isWhole, view, widthPx, heightPx } = get()
     set({ bounds })
-    if (isFirst && get().isWhole) get().showWhole()
+    if (isWhole && (before === null || !isInSight(bounds, view, widthPx, heightPx))) get().showWhole()
   },
   showWhole: () => {
     const { bounds, widthPx, heightPx } = get()
