@@ -1,4 +1,4 @@
-/** Names over the hubs with fit and verdict in words, names under the bearings, diameters on the shaft. */
+/** Names over the hubs with fit and verdict in words, and diameters on the shaft. */
 import { memo, useCallback, useMemo } from 'react'
 import type { Hub, LayoutDocument } from '@shared/layout/layout-document'
 import { sectionSpans } from '@shared/layout/shaft-geometry'
@@ -10,7 +10,7 @@ import { useSelectionStore } from '@/stores/selection-store'
 import { type PartState, stateOf } from '../part-states'
 import { bearingExtent, hubExtent } from '../tools/part'
 import { drawingMargins, useViewStore } from '../view-store'
-import { drawTag, FONT } from './draw-dimension'
+import { FONT } from './draw-dimension'
 import { Drawn, type Pen } from './drawn'
 import { LABEL_LINE_PX, type LabelWish, placeLabels } from './label-layout'
 import { RULER_HEIGHT_PX } from './ruler'
@@ -129,43 +129,6 @@ export const PartLabels = memo(function PartLabels({
       }
     },
     [document, words, view, widthPx, colours, selectedIds],
-  )
-  return <Drawn draw={draw} />
-})
-
-export const BearingLabels = memo(function BearingLabels({
-  document,
-  states,
-}: {
-  document: LayoutDocument
-  states: ReadonlyMap<string, PartState>
-}) {
-  const colours = useThemeColours()
-  const view = useViewStore((state) => state.view)
-  const draw = useCallback(
-    (pen: Pen) => {
-      let lastRightPx = -Infinity
-      pen.font = FONT.strong
-      for (const bearing of [...document.bearings].sort((a, b) => a.stationMm - b.stationMm)) {
-        const extent = bearingExtent(document, bearing)
-        const state = stateOf(states, bearing.id)
-        const isWrong = state.verdict === 'fails'
-        const x = stationToPx(view, bearing.stationMm)
-        const half = (text: string) => pen.measureText(text).width / 2 + 5
-        const whole = isWrong ? `✕ ${bearing.name} ${state.words}` : `${bearing.name}, ${bearing.kind}`
-        const short = isWrong ? `✕ ${bearing.name}` : bearing.name
-        // Beside a near neighbour the name alone has to do; where even that is too long it steps down.
-        const text = x - half(whole) < lastRightPx ? short : whole
-        const isCovered = x - half(text) < lastRightPx
-        lastRightPx = Math.max(lastRightPx, x + half(text))
-        drawTag(pen, text, x, heightToPx(view, -extent.outerRadiusMm) + (isCovered ? 27 : 12), {
-          font: FONT.strong,
-          ink: isWrong ? colours.bad : colours.steel,
-          ground: colours.paper,
-        })
-      }
-    },
-    [document, states, view, colours],
   )
   return <Drawn draw={draw} />
 })

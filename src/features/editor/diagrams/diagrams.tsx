@@ -101,7 +101,7 @@ export function Diagrams() {
           ))}
         </div>
       )}
-      {shown && (
+      {shown !== null && shown.diagrams.stationMm.length > 0 && (
         <div className="absolute top-0.5 right-3 flex items-center gap-2 text-[11px] font-semibold text-quiet">
           {isOld && <span className="rounded bg-paper/85 px-1.5">updating…</span>}
           <label className="flex items-center gap-1 rounded bg-paper/85 px-1.5">

@@ -77,7 +77,9 @@ export function EndViewDrawing({ document, phases, forces, from }: EndViewDrawin
           strokeDasharray={mark.isOff ? '4 2.5' : undefined}
         />
       ))}
-      <circle r={shaftRadius * scale} className="fill-card stroke-ink" strokeWidth={1.2} />
+      {document.shaft.sections.length > 0 && (
+        <circle r={shaftRadius * scale} className="fill-card stroke-ink" strokeWidth={1.2} />
+      )}
       {bore > 0 && bore < shaftRadius && (
         <circle r={bore * scale} className="fill-paper stroke-ink" strokeWidth={1} />
       )}
