@@ -27,6 +27,12 @@ export interface Recalculation {
 const CRASHED =
   'The calculation stopped. It starts again with the next change; if it does not, reload the page.'
 
+/**
+ * While something is dragged the numbers follow twenty times a second: fast enough to steer by, and
+ * the frames between stay free for the drawing itself.
+ */
+const PREVIEW_INTERVAL_MS = 50
+
 let running: Recalculation | null = null
 
 export function startRecalculation(createPort: () => RecalculationPort = createWorkerPort): Recalculation {
@@ -36,6 +42,8 @@ export function startRecalculation(createPort: () => RecalculationPort = createW
   let lastRunId = 0
   let inWorker: { runId: number; document: LayoutDocument } | null = null
   let waiting: LayoutDocument | null = null
+  let lastPostedAt = -Infinity
+  let timer: ReturnType<typeof setTimeout> | undefined
   let lastRequestId = 0
   const asked = new Map<
     number,
@@ -65,7 +73,14 @@ export function startRecalculation(createPort: () => RecalculationPort = createW
   }
 
   const runNext = () => {
+    clearTimeout(timer)
     if (inWorker !== null || waiting === null) return
+    const restMs = lastPostedAt + PREVIEW_INTERVAL_MS - performance.now()
+    if (useLayoutStore.getState().preview !== null && restMs > 0) {
+      timer = setTimeout(runNext, restMs)
+      return
+    }
+    lastPostedAt = performance.now()
     inWorker = { runId: ++lastRunId, document: waiting }
     waiting = null
     ;(port ?? openPort()).post({ kind: 'recalculate', ...inWorker })
@@ -107,6 +122,7 @@ export function startRecalculation(createPort: () => RecalculationPort = createW
 
   /** Another layout: what is in the worker belongs to the old one, and so do the numbers on screen. */
   const forget = () => {
+    clearTimeout(timer)
     inWorker = null
     waiting = null
     dropAsked('Another layout was opened.')

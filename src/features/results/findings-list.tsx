@@ -13,7 +13,10 @@ import { useLasting } from './use-lasting'
 export function FindingsList() {
   const findings = useResultsStore((state) => state.results?.findings)
   const document = useResultsStore((state) => state.document)
-  const isUpdating = useLasting(useResultsStore((state) => state.isStale))
+  const isUpdating = useLasting(
+    useResultsStore((state) => state.isStale),
+    results,
+  )
   const selectedIds = useSelectionStore((state) => state.selectedIds)
   const [hidden, setHidden] = useState<readonly Severity[]>([])
   const [isOnlySelected, setIsOnlySelected] = useState(false)

@@ -17,7 +17,10 @@ export function VerdictStrip() {
   const results = useResultsStore((state) => state.results)
   const document = useResultsStore((state) => state.document)
   const selected = useResultsStore((state) => state.selectedLoadCaseId)
-  const isUpdating = useLasting(useResultsStore((state) => state.isStale))
+  const isUpdating = useLasting(
+    useResultsStore((state) => state.isStale),
+    results,
+  )
   const failure = useResultsStore((state) => state.failure)
   const units = usePreferencesStore((state) => state.units)
 

@@ -1,4 +1,4 @@
-import { afterEach, beforeEach, describe, expect, it } from 'vitest'
+import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 import { EMPTY_LAYOUT_STATE, useLayoutStore } from '@/stores/layout-store'
 import {
   type Recalculation,
@@ -75,6 +75,26 @@ describe('recalculation', () => {
     worker().answer(1)
     expect(shownHash()).toBe('three')
     expect(useResultsStore.getState().isStale).toBe(false)
+  })
+
+  it('lets the numbers of a drag follow twenty times a second, and the drop at once', () => {
+    vi.useFakeTimers()
+    try {
+      const preview = { label: 'Move A', operations: [] }
+      useLayoutStore.setState({ visible: blankLayout('drag 1'), preview })
+      worker().answer(0)
+      useLayoutStore.setState({ visible: blankLayout('drag 2'), preview })
+      useLayoutStore.setState({ visible: blankLayout('drag 3'), preview })
+      expect(worker().documents()).toEqual(['drag 1'])
+      vi.advanceTimersByTime(60)
+      expect(worker().documents()).toEqual(['drag 1', 'drag 3'])
+      worker().answer(1)
+      useLayoutStore.setState({ visible: blankLayout('drag 4'), preview })
+      useLayoutStore.setState({ visible: blankLayout('dropped'), preview: null })
+      expect(worker().documents()).toEqual(['drag 1', 'drag 3', 'dropped'])
+    } finally {
+      vi.useRealTimers()
+    }
   })
 
   it('drops a reply that comes twice or for a run it does not wait for', () => {

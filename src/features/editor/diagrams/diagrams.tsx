@@ -15,12 +15,17 @@ import { diagramSeries } from './diagram-series'
 /** Results follow a drag within a frame or two; only what lasts longer is worth saying. */
 const STALE_AFTER_MS = 300
 
-function useIsOld(isStale: boolean): boolean {
+/** Old only when no newer numbers came meanwhile: during a drag they keep coming. */
+function useIsOld(isStale: boolean, calculated: unknown): boolean {
   const [isOld, setIsOld] = useState(false)
   useEffect(() => {
-    const timer = setTimeout(() => setIsOld(isStale), isStale ? STALE_AFTER_MS : 0)
-    return () => clearTimeout(timer)
-  }, [isStale])
+    if (!isStale) return
+    const timer = setTimeout(() => setIsOld(true), STALE_AFTER_MS)
+    return () => {
+      clearTimeout(timer)
+      setIsOld(false)
+    }
+  }, [isStale, calculated])
   return isStale && isOld
 }
 
@@ -47,7 +52,10 @@ export function Diagrams() {
   const results = useResultsStore((state) => state.results)
   const document = useResultsStore((state) => state.document)
   const selected = useResultsStore((state) => state.selectedLoadCaseId)
-  const isOld = useIsOld(useResultsStore((state) => state.isStale))
+  const isOld = useIsOld(
+    useResultsStore((state) => state.isStale),
+    results,
+  )
   const failure = useResultsStore((state) => state.failure)
   const view = useViewStore((state) => state.view)
   const widthPx = useViewStore((state) => state.widthPx)
