@@ -15,7 +15,7 @@ export function FindingsList() {
   const document = useResultsStore((state) => state.document)
   const isUpdating = useLasting(
     useResultsStore((state) => state.isStale),
-    results,
+    document,
   )
   const selectedIds = useSelectionStore((state) => state.selectedIds)
   const [hidden, setHidden] = useState<readonly Severity[]>([])

@@ -19,7 +19,7 @@ export function VerdictStrip() {
   const selected = useResultsStore((state) => state.selectedLoadCaseId)
   const isUpdating = useLasting(
     useResultsStore((state) => state.isStale),
-    results,
+    document,
   )
   const failure = useResultsStore((state) => state.failure)
   const units = usePreferencesStore((state) => state.units)

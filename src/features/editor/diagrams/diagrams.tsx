@@ -54,7 +54,7 @@ export function Diagrams() {
   const selected = useResultsStore((state) => state.selectedLoadCaseId)
   const isOld = useIsOld(
     useResultsStore((state) => state.isStale),
-    results,
+    document,
   )
   const failure = useResultsStore((state) => state.failure)
   const view = useViewStore((state) => state.view)
