@@ -5,7 +5,7 @@ import type { DiagramStation, SectionForces } from '../engineering/shaft/section
 import { equivalentStress, nominalStress } from '../engineering/shaft/shaft-stress'
 import type { NotchResult } from './layout-results'
 import type { Notch } from './notches'
-import type { ShaftCaseInputs } from './shaft-case-result'
+import type { ShaftCaseInputs } from './shaft-case-inputs'
 
 export function notchResults(inputs: ShaftCaseInputs, forces: SectionForces): NotchResult[] {
   return inputs.notches.map((notch) => notchResult(inputs, forces, notch))

@@ -3,36 +3,13 @@ import { EngineeringInputError } from '../engineering/engineering-input-error'
 import { torqueBalance } from '../engineering/load-cases/torque-balance'
 import { mm, newton, newtonMetre, toMPa, toMrad, toUm } from '../engineering/quantities/units'
 import { shapeAt, shapeCurves, type ShapePoint } from '../engineering/shaft/beam-shape'
-import { solveBeam, type BeamSolution, type FactoredBeam } from '../engineering/shaft/beam-solver'
-import { sectionForces, type DiagramStation, type SectionForces } from '../engineering/shaft/section-forces'
-import type { ShaftLoad, ShaftModel, ShaftSegment } from '../engineering/shaft/shaft-model'
+import { solveBeam, type BeamSolution } from '../engineering/shaft/beam-solver'
+import { sectionForces, type SectionForces } from '../engineering/shaft/section-forces'
+import type { ShaftLoad } from '../engineering/shaft/shaft-model'
 import { equivalentStressCourse } from '../engineering/shaft/shaft-stress'
 import type { ShaftDiagrams, ShaftLoadCaseResult, StationValue } from './layout-results'
 import { notchResults } from './notch-results'
-import type { Notch } from './notches'
-
-interface Place {
-  part: string
-  stationMm: number
-}
-
-export interface ShaftCaseInputs {
-  loadCaseId: string
-  applicationFactor: number
-  model: ShaftModel
-  beam: FactoredBeam
-  stations: readonly DiagramStation[]
-  loads: readonly ShaftLoad[]
-  bearings: readonly Place[]
-  locatingId: string | null
-  /** Where slope and deflection are reported. */
-  places: readonly Place[]
-  /** Interface pressure over each station at the most interference; 0 beside seats. */
-  pressures: Float64Array
-  /** Section under each station, on its side of a step. */
-  sections: readonly ShaftSegment[]
-  notches: readonly Notch[]
-}
+import type { ShaftCaseInputs } from './shaft-case-inputs'
 
 export function shaftCaseResult(inputs: ShaftCaseInputs): ShaftLoadCaseResult {
   const solution = solveBeam(inputs.beam, inputs.loads)

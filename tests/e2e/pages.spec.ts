@@ -65,7 +65,7 @@ test('the theme chosen in the menu wins over the system and is kept', async ({ o
 
 test('on a phone the findings of a layout can be read', async ({ openAs, problems }) => {
   const vera = await openAs('vera', { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true })
-  await openLayout(vera, 'Camshaft, assembled')
+  await openLayout(vera, 'Assembled inlet camshaft, four cylinders')
   await expect(seatVerdict(vera)).toBeVisible()
   await vera.getByRole('tab', { name: /Findings/ }).click()
   await expect(vera.getByText(/195|165/).first()).toBeVisible()
@@ -75,7 +75,7 @@ test('on a phone the findings of a layout can be read', async ({ openAs, problem
 
 test('the bench fits a screen of 1024 by 768 without scrolling sideways', async ({ openAs, problems }) => {
   const dina = await openAs('dina', { viewport: { width: 1024, height: 768 } })
-  await openLayout(dina, 'Line shaft')
+  await openLayout(dina, 'Cartoning machine, line shaft')
   await expect(dina.getByTestId('layout-canvas')).toBeVisible()
   expect(await sidewaysOverflow(dina)).toBeLessThanOrEqual(0)
   expect(problems).toEqual([])

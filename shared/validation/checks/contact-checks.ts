@@ -12,7 +12,7 @@ import {
   toMPa,
   toMm,
 } from '../../engineering/quantities/units'
-import { FE_PRESS_FIT_CASES, type FeMaterial, type FePressFitCase } from '../data/fe-press-fit-cases'
+import { FE_PRESS_FIT_CASES, type FeMaterial, type FePressFitCase } from '../data/press-fit-reference'
 import type { ValidationCheck } from '../validation-check'
 
 const materialOf = (given: FeMaterial) => ({

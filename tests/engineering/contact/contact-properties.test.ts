@@ -262,7 +262,7 @@ describe('contact solution', () => {
       'sections.0.boreDiameter',
     ],
   ])('refuses %s and names the field', (_name, change, path) => {
-    const model = change(twoHubs(30, 10, 0)) as ContactModel
+    const model = change(twoHubs(30, 10, 0))
     try {
       prepareContact(model, COARSE_MESH)
       expect.unreachable('must be refused')

@@ -193,5 +193,5 @@ export async function changeStatus(
   )
   world.clock.runDeferred()
   const error = await settled
-  if (error !== null) throw error
+  if (error instanceof Error) throw error
 }
