@@ -7,7 +7,12 @@ import { browserClock } from '@/sync/client-clock'
 import { LayoutSync } from '@/sync/layout-sync'
 import { createMemoryOutbox } from '@/sync/memory-outbox'
 import { openSocket, socketConnection, type RealtimeClientSocket } from '@/sync/socket-connection'
-import type { TestApp, TestPerson } from '../../support/test-app'
+
+/** What a client needs to know of a server, whether it runs in this process or in one of its own. */
+export interface Reachable {
+  readonly url: string
+  readonly server: { readonly port: number }
+}
 
 export interface RealClient {
   session: LayoutSync
@@ -15,11 +20,15 @@ export interface RealClient {
   readonly state: LayoutState
 }
 
-export function socketFor(app: TestApp, cookie: string, origin = app.url): RealtimeClientSocket {
+export function socketFor(app: Reachable, cookie: string, origin = app.url): RealtimeClientSocket {
   return openSocket(`http://127.0.0.1:${app.server.port}`, { cookie, origin })
 }
 
-export async function openClient(app: TestApp, person: TestPerson, layoutId: string): Promise<RealClient> {
+export async function openClient(
+  app: Reachable,
+  person: { cookie: string },
+  layoutId: string,
+): Promise<RealClient> {
   const store = createLayoutStore()
   const session = new LayoutSync({
     layoutId,
@@ -59,7 +68,7 @@ export class RawSocket {
 
   constructor(readonly socket: RealtimeClientSocket) {}
 
-  static async connect(app: TestApp, cookie: string): Promise<RawSocket> {
+  static async connect(app: Reachable, cookie: string): Promise<RawSocket> {
     const socket = socketFor(app, cookie)
     await new Promise<void>((resolve, reject) => {
       socket.once('connect', resolve)
