@@ -12,8 +12,8 @@ const BENCH_GOAL_KB = 330
 /** Modules that a page imports dynamically on its way to being shown. */
 const SIGN_IN_ENTRIES = ['index.html']
 const BENCH_ENTRIES = ['index.html', 'src/app/data-routes.tsx', 'src/app/routes/bench/bench-route.tsx']
-/** Workers are built apart from the manifest; the bench starts every one there is. */
-const WORKER_FILE = /worker[^/]*\.js$/
+/** Workers are built apart from the manifest; the bench starts this one. */
+const WORKER_FILE = /recalculation-worker[^/]*\.js$/
 
 /** Files of the chunks and of everything they import statically. */
 function filesOf(manifest: Manifest, entries: readonly string[]): Set<string> {

@@ -44,7 +44,7 @@ export async function measure(): Promise<BenchFigure[]> {
     for (const { session } of clients) session.close()
     const round = (value: number) => Number(value.toFixed(2))
     const common = {
-      unit: 'ms',
+      unit: 'ms' as const,
       runs: seen.length,
       min: round(Math.min(...seen)),
       max: round(Math.max(...seen)),
