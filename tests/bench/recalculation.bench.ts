@@ -4,8 +4,8 @@ import { generatedLayout } from '../support/generated-layout'
 import { median, type BenchFigure } from './bench-figure'
 
 const SIZE = { hubs: 30, sections: 6, loadCases: 5 }
-const WARM_UP_RUNS = 25
-const RUNS = 21
+const WARM_UP_RUNS = 60
+const RUNS = 41
 
 function timed(run: () => void): number {
   const start = performance.now()

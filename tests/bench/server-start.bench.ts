@@ -22,7 +22,14 @@ async function startToFirstPage(dataDir: string): Promise<number> {
   const port = await freePort()
   const startedAt = performance.now()
   const server = spawn(join('node_modules', '.bin', 'tsx'), ['server/commands/start.ts'], {
-    env: { ...process.env, PORT: String(port), DATA_DIR: dataDir, LOG_LEVEL: 'error' },
+    // A build in the same process leaves NODE_ENV at production, which starts only with real services.
+    env: {
+      ...process.env,
+      NODE_ENV: 'development',
+      PORT: String(port),
+      DATA_DIR: dataDir,
+      LOG_LEVEL: 'error',
+    },
     stdio: 'ignore',
   })
   try {
