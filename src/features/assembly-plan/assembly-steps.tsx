@@ -1,5 +1,6 @@
 import { Cell, ColumnHead } from '@/components/data-table'
 import { ValueButton } from '@/components/value-button'
+import { JOINING_METHODS, JOINING_SIDES } from '@/fields/joining-options'
 import { LayoutChoiceField } from '@/fields/layout-choice-field'
 import { hubAddress } from '@/fields/part-address'
 import { formatResult, NOT_COMPUTED } from '@/lib/format-quantity'
@@ -15,17 +16,6 @@ interface AssemblyStepsProps {
   units: UnitSystem
   nameOf: (id: string) => string
 }
-
-const METHODS = [
-  { value: 'heat-hub', label: 'heat the hub' },
-  { value: 'cool-shaft', label: 'cool the shaft' },
-  { value: 'heat-and-cool', label: 'heat hub, cool shaft' },
-  { value: 'press', label: 'press on cold' },
-]
-const SIDES = [
-  { value: 'left', label: 'from the left' },
-  { value: 'right', label: 'from the right' },
-]
 
 /** In order of assembly; what has no place in the order stands at the end. */
 export function AssemblySteps({ layout, results, units, nameOf }: AssemblyStepsProps) {
@@ -126,7 +116,7 @@ function HubStep({
           label={`Side of ${hub.name}`}
           arrangement="cell"
           address={hubAddress([hub], 'joining.side')}
-          options={SIDES}
+          options={JOINING_SIDES}
           className="w-36"
         />
       </Cell>
@@ -135,7 +125,7 @@ function HubStep({
           label={`Method of ${hub.name}`}
           arrangement="cell"
           address={hubAddress([hub], 'joining.method')}
-          options={METHODS}
+          options={JOINING_METHODS}
           className="w-44"
         />
       </Cell>

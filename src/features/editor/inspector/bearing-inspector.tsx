@@ -1,3 +1,4 @@
+import { JOINING_SIDES } from '@/fields/joining-options'
 import { LayoutChoiceField } from '@/fields/layout-choice-field'
 import { LayoutQuantityField } from '@/fields/layout-quantity-field'
 import { LayoutTextField } from '@/fields/layout-text-field'
@@ -19,11 +20,7 @@ const HOUSINGS = [
   { value: 'ring', label: 'ring, slides on' },
   { value: 'split', label: 'split, closed on' },
 ]
-const SIDES = [
-  { value: 'none', label: 'not said' },
-  { value: 'left', label: 'from the left' },
-  { value: 'right', label: 'from the right' },
-]
+const SIDES = [{ value: 'none', label: 'not said' }, ...JOINING_SIDES]
 
 export function BearingFields({
   bearings,

@@ -10,6 +10,32 @@ import { FieldGrid } from './inspector-parts'
 
 const ROLES = ['gear', 'cam', 'pulley', 'disc', 'ring', 'other'].map((value) => ({ value, label: value }))
 
+export function HubLengthField({ hubs }: { hubs: readonly Hub[] }) {
+  return (
+    <LayoutQuantityField
+      label="Length"
+      kind="length"
+      address={hubAddress(hubs, 'lengthMm')}
+      min={0}
+      isMinExclusive
+      max={5_000}
+    />
+  )
+}
+
+export function HubOuterDiameterField({ hubs }: { hubs: readonly Hub[] }) {
+  return (
+    <LayoutQuantityField
+      label="Outer ⌀"
+      kind="length"
+      address={hubAddress(hubs, 'outerDiameterMm')}
+      min={0}
+      isMinExclusive
+      max={10_000}
+    />
+  )
+}
+
 /** What is changed most: where it is and how big. */
 export function HubDimensionFields({ hubs }: { hubs: readonly Hub[] }) {
   return (
@@ -21,22 +47,8 @@ export function HubDimensionFields({ hubs }: { hubs: readonly Hub[] }) {
         min={-20_000}
         max={20_000}
       />
-      <LayoutQuantityField
-        label="Length"
-        kind="length"
-        address={hubAddress(hubs, 'lengthMm')}
-        min={0}
-        isMinExclusive
-        max={5_000}
-      />
-      <LayoutQuantityField
-        label="Outer ⌀"
-        kind="length"
-        address={hubAddress(hubs, 'outerDiameterMm')}
-        min={0}
-        isMinExclusive
-        max={10_000}
-      />
+      <HubLengthField hubs={hubs} />
+      <HubOuterDiameterField hubs={hubs} />
     </FieldGrid>
   )
 }

@@ -1,19 +1,9 @@
+import { JOINING_METHODS, JOINING_SIDES } from '@/fields/joining-options'
 import { LayoutChoiceField } from '@/fields/layout-choice-field'
 import { LayoutQuantityField } from '@/fields/layout-quantity-field'
 import { hubAddress } from '@/fields/part-address'
 import type { Hub } from '@shared/layout/layout-document'
 import { FieldGrid } from './inspector-parts'
-
-const METHODS = [
-  { value: 'heat-hub', label: 'heat the hub' },
-  { value: 'cool-shaft', label: 'cool the shaft' },
-  { value: 'heat-and-cool', label: 'heat hub, cool shaft' },
-  { value: 'press', label: 'press on cold' },
-]
-const SIDES = [
-  { value: 'left', label: 'from the left' },
-  { value: 'right', label: 'from the right' },
-]
 
 export function JoiningFields({ hubs }: { hubs: readonly Hub[] }) {
   const methods = new Set(hubs.map(({ joining }) => joining.method))
@@ -22,8 +12,12 @@ export function JoiningFields({ hubs }: { hubs: readonly Hub[] }) {
   const isHeated = methods.has('heat-hub') || methods.has('heat-and-cool')
   return (
     <FieldGrid>
-      <LayoutChoiceField label="Method" address={hubAddress(hubs, 'joining.method')} options={METHODS} />
-      <LayoutChoiceField label="Side" address={hubAddress(hubs, 'joining.side')} options={SIDES} />
+      <LayoutChoiceField
+        label="Method"
+        address={hubAddress(hubs, 'joining.method')}
+        options={JOINING_METHODS}
+      />
+      <LayoutChoiceField label="Side" address={hubAddress(hubs, 'joining.side')} options={JOINING_SIDES} />
       <LayoutQuantityField
         label="Ambient"
         kind="temperature"

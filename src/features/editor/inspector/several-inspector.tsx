@@ -4,6 +4,7 @@ import type { UnitSystem } from '@/lib/quantity-units'
 import type { Bearing, Hub, LayoutDocument, ShaftSection } from '@shared/layout/layout-document'
 import { BearingFields } from './bearing-inspector'
 import { FrictionFields } from './friction-fields'
+import { HubLengthField, HubOuterDiameterField } from './hub-fields'
 import { FieldGrid, Group } from './inspector-parts'
 import { JoiningFields } from './joining-fields'
 import { MaterialFields, Unfolding } from './lazy-fields'
@@ -42,22 +43,8 @@ export function SeveralInspector({ hubs, bearings, sections, layout, units }: Se
         <>
           <Group title={hubs.length === 1 ? `Hub ${firstHub.name}` : 'All selected hubs'}>
             <FieldGrid>
-              <LayoutQuantityField
-                label="Length"
-                kind="length"
-                address={hubAddress(hubs, 'lengthMm')}
-                min={0}
-                isMinExclusive
-                max={5_000}
-              />
-              <LayoutQuantityField
-                label="Outer ⌀"
-                kind="length"
-                address={hubAddress(hubs, 'outerDiameterMm')}
-                min={0}
-                isMinExclusive
-                max={10_000}
-              />
+              <HubLengthField hubs={hubs} />
+              <HubOuterDiameterField hubs={hubs} />
               <LayoutQuantityField
                 label="Bore roughness Rz"
                 kind="roughness"
