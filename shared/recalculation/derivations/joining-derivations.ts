@@ -5,7 +5,7 @@ import type { HubCalculation } from '../hub-result'
 import type { Seat } from '../seat'
 import type { TightState } from '../seat-state'
 import { cite, derivation, input, missing, opening } from './derivation-parts'
-import { diameter, effectiveLength, interference } from './seat-inputs'
+import { cooledShaftInputs, diameter, effectiveLength, interference } from './seat-inputs'
 
 export function joiningDerivation(hub: HubCalculation, seat: Seat, which: 'joining' | 'oven'): Derivation {
   const { method, joint, handlingAllowance } = seat.joining
@@ -47,18 +47,7 @@ export function joiningDerivation(hub: HubCalculation, seat: Seat, which: 'joini
       diameter(seat),
       input('α_A', 'expansion of the hub', joint.hub.expansion, '1/K', joint.hub.name),
       input('t_0', 'room temperature', toCelsius(joint.ambient), '°C', 'entered, else 20 °C'),
-      ...(isCooled
-        ? [
-            input('α_I', 'contraction of the shaft', joint.shaft.coolingExpansion, '1/K', joint.shaft.name),
-            input(
-              't_I',
-              'temperature of the cooled shaft',
-              toCelsius(joint.shaftTemperature),
-              '°C',
-              'entered',
-            ),
-          ]
-        : []),
+      ...(isCooled ? cooledShaftInputs(joint) : []),
     ],
     symbol: 't_A',
     value: joiningC,

@@ -1,4 +1,5 @@
 /** Inputs that many derivations of a seat share. */
+import type { HeatedJoint } from '../../engineering/interference-fit/joining-temperature'
 import { toCelsius, toMm, toMPa, toRpm, toUm } from '../../engineering/quantities/units'
 import type { DerivationInput } from '../derivation'
 import type { Seat } from '../seat'
@@ -114,5 +115,13 @@ export function rotationInputs(seat: Seat, state: SeatCaseState): DerivationInpu
     input('ρ_A', 'density of the hub', hub.material.density, 'kg/m³', hub.material.name),
     input('ρ_I', 'density of the shaft', shaft.material.density, 'kg/m³', shaft.material.name),
     ...ringInputs(seat),
+  ]
+}
+
+/** What cooling the shaft adds to the inputs of a joining temperature. */
+export function cooledShaftInputs(joint: HeatedJoint): DerivationInput[] {
+  return [
+    input('α_I', 'contraction of the shaft', joint.shaft.coolingExpansion, '1/K', joint.shaft.name),
+    input('t_I', 'temperature of the cooled shaft', toCelsius(joint.shaftTemperature), '°C', 'entered'),
   ]
 }

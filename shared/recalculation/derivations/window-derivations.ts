@@ -12,6 +12,7 @@ import { cite, derivation, input, type DerivationBody } from './derivation-parts
 import {
   caseChanges,
   COMPLIANCE_FORMULA,
+  cooledShaftInputs,
   demandInputs,
   diameter,
   effectiveLength,
@@ -214,18 +215,7 @@ function heatBody(seat: Seat): Body {
       input('Δt_h', 'lost between oven and seat', handlingAllowance, 'K', 'entered'),
       input('t_0', 'room temperature', toCelsius(joint.ambient), '°C', 'entered, else 20 °C'),
       input('s', 'clearance while travelling', toUm(joint.clearance), 'µm', 'entered, else D/1000'),
-      ...(isCooled
-        ? [
-            input('α_I', 'contraction of the shaft', joint.shaft.coolingExpansion, '1/K', joint.shaft.name),
-            input(
-              't_I',
-              'temperature of the cooled shaft',
-              toCelsius(joint.shaftTemperature),
-              '°C',
-              'entered',
-            ),
-          ]
-        : []),
+      ...(isCooled ? cooledShaftInputs(joint) : []),
     ],
     model: 'The bore grows by as much as the oven may heat it, less the clearance it travels with.',
     validity: 'Mean expansion from 20 °C upward; hub evenly heated.',
