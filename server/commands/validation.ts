@@ -1,28 +1,27 @@
 /** Prints the table of checks against published values and independent solvers. Exit status 1 when one is off. */
-import { findSource } from '@shared/engineering/sources/source-registry'
-import { ALL_CHECKS } from '@shared/validation/all-checks'
-import { runCheck, type ValidationOutcome } from '@shared/validation/validation-check'
+import { validationRows } from '@shared/validation/validation-rows'
+import type { ValidationRow } from '@shared/validation/worker-messages'
 
 const number = (value: number) => String(Number(value.toPrecision(6)))
 
-function row({ check, ours, deviation, passes }: ValidationOutcome): string {
-  const isRelative = check.tolerance.kind === 'relative'
+function line(row: ValidationRow): string {
+  const isRelative = row.tolerance.kind === 'relative'
   const share = (value: number) =>
-    isRelative ? `${number(value * 100)} %` : `${number(value)} ${check.unit}`.trim()
+    isRelative ? `${number(value * 100)} %` : `${number(value)} ${row.unit}`.trim()
   return [
-    passes ? 'ok ' : 'OFF',
-    check.title,
-    `${findSource(check.source).citation}, ${check.place}${check.isFromMemory ? ' (from memory)' : ''}`,
-    `reference ${check.reference.map(number).join(' / ')} ${check.unit}`.trim(),
-    `ours ${ours.map(number).join(' / ')}`,
-    `deviation ${share(deviation)}`,
-    `tolerance ${share(check.tolerance.value)}: ${check.reason}`,
+    row.passes ? 'ok ' : 'OFF',
+    row.title,
+    `${row.citation}, ${row.place}${row.isFromMemory ? ' (from memory)' : ''}`,
+    `reference ${row.reference.map(number).join(' / ')} ${row.unit}`.trim(),
+    `ours ${row.ours.map(number).join(' / ')}`,
+    `deviation ${share(row.deviation)}`,
+    `tolerance ${share(row.tolerance.value)}: ${row.reason}`,
   ].join(' | ')
 }
 
-const outcomes = ALL_CHECKS.map(runCheck)
-for (const outcome of outcomes) process.stdout.write(`${row(outcome)}\n`)
-const off = outcomes.filter((outcome) => !outcome.passes)
-const sources = new Set(ALL_CHECKS.map((check) => check.source))
-process.stdout.write(`${outcomes.length} checks from ${sources.size} sources, ${off.length} off\n`)
+const rows = validationRows()
+for (const row of rows) process.stdout.write(`${line(row)}\n`)
+const off = rows.filter((row) => !row.passes)
+const sources = new Set(rows.map((row) => row.citation))
+process.stdout.write(`${rows.length} checks from ${sources.size} sources, ${off.length} off\n`)
 process.exitCode = off.length > 0 ? 1 : 0

@@ -16,8 +16,8 @@ export const FINE_MESH: MeshQuality = { edge: 0.01, growth: 0.3, largest: 0.1, f
 /** For dragging: mean within about 2 %. */
 export const COARSE_MESH: MeshQuality = { edge: 0.05, growth: 0.5, largest: 0.25, foot: 0.5 }
 
-/** Above this the solution is refused: some 60 MB of matrix and unit solutions. */
-export const MAX_CONTACT_NODES = 60_000
+/** Grid places, of which a good half become nodes; above it a browser tab would run short of memory. */
+const MAX_GRID_PLACES = 120_000
 
 /** One pair of matching seat nodes. */
 export interface SeatPair {
@@ -148,7 +148,7 @@ function hubCells(hub: ContactHub, stations: readonly number[], radii: readonly 
  * @param model [SI] shaft sections and hubs
  * @param quality [1] sizes relative to the seat diameter
  * @returns [m] nodes and elements, seat pairs, surface nodes
- * @throws EngineeringInputError as `requireMeshable`; `outOfRange` when it needs more than 60 000 nodes
+ * @throws EngineeringInputError as `requireMeshable`; `outOfRange` when its grid has more than 120 000 places
  *
  * Validity: sharp edges (chamfers shorten the seat, they are not modelled), no crowning.
  * Source: fe-press-fit mesh study; finite-elements
@@ -160,8 +160,8 @@ export function buildContactMesh(model: ContactModel, quality: MeshQuality): Con
   const stations = axialLines(model, quality, tolerance)
   const shaftRadii = shaftRadialLines(model, quality, tolerance)
   const hubRadii = model.hubs.map((hub) => hubRadialLines(hub, quality, tolerance))
-  const upper = stations.length * (shaftRadii.length + Math.max(...hubRadii.map((lines) => lines.length)))
-  if (upper > 2 * MAX_CONTACT_NODES)
+  const places = stations.length * (shaftRadii.length + Math.max(...hubRadii.map((lines) => lines.length)))
+  if (places > MAX_GRID_PLACES)
     throw new EngineeringInputError(
       'outOfRange',
       'hubs',

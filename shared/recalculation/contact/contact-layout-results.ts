@@ -41,11 +41,3 @@ export interface ContactCase {
   /** False when the contact did not settle; the numbers of this case are then not to be used. */
   hasSettled: boolean
 }
-
-/** Pressure along one seat, for the diagram. */
-export interface ContactSeatProfile {
-  hub: string
-  stationMm: number[]
-  pressureMPa: number[]
-  isOpen: boolean[]
-}

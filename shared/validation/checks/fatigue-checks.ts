@@ -6,6 +6,7 @@ import {
   seatEdgeNotchFactors,
   shoulderConcentration,
 } from '../../engineering/shaft/notch-factors'
+import { SEAT_EDGE_FACTORS } from '../data/seat-edge-factors'
 import type { ValidationCheck } from '../validation-check'
 
 const KPSI = 6.894757293168361
@@ -34,18 +35,6 @@ function example71(criterion: FatigueCriterion): number {
   )
 }
 
-const NOTCH_TABLE = [
-  [400, 1.8, 1.2],
-  [500, 2, 1.3],
-  [600, 2.2, 1.4],
-  [700, 2.3, 1.5],
-  [800, 2.5, 1.6],
-  [900, 2.6, 1.7],
-  [1000, 2.7, 1.8],
-  [1100, 2.8, 1.8],
-  [1200, 2.9, 1.9],
-] as const
-
 function shigley71(
   id: string,
   title: string,
@@ -73,7 +62,7 @@ function shigley71(
 }
 
 export const FATIGUE_CHECKS: readonly ValidationCheck[] = [
-  ...NOTCH_TABLE.map(([tensile, bending, torsion]): ValidationCheck => ({
+  ...SEAT_EDGE_FACTORS.map(([tensile, bending, torsion]): ValidationCheck => ({
     id: `seat-edge-${tensile}`,
     topic: 'fatigue',
     title: `Fatigue notch factors at the edge of a press-fit seat, Rm = ${tensile} MPa (bending, torsion)`,

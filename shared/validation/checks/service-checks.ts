@@ -8,17 +8,19 @@ import { looseningSpeed, rotationHoopStress, speedLoss } from '../../engineering
 import { hubStress } from '../../engineering/interference-fit/hub-stress'
 import {
   celsius,
+  kelvin,
+  kilogram,
   metre,
   mm,
   pascal,
   rpm,
+  squareMetre,
   toCelsius,
   toMPa,
   toRpm,
   um,
 } from '../../engineering/quantities/units'
 import { temperatureInAir, heatLoss } from '../../engineering/assembly/cooling-on-the-way'
-import { kelvin, kilogram, squareMetre } from '../../engineering/quantities/units'
 import { elasticMaterial } from '../validation-materials'
 import type { ValidationCheck } from '../validation-check'
 

@@ -6,21 +6,10 @@
 import { describe, expect, it } from 'vitest'
 import { mPa } from '@shared/engineering/quantities/units'
 import { seatEdgeNotchFactors } from '@shared/engineering/shaft/notch-factors'
-
-const TABLE = [
-  [400, 1.8, 1.2],
-  [500, 2.0, 1.3],
-  [600, 2.2, 1.4],
-  [700, 2.3, 1.5],
-  [800, 2.5, 1.6],
-  [900, 2.6, 1.7],
-  [1000, 2.7, 1.8],
-  [1100, 2.8, 1.8],
-  [1200, 2.9, 1.9],
-] as const
+import { SEAT_EDGE_FACTORS } from '@shared/validation/data/seat-edge-factors'
 
 describe('seat edge in bending and torsion', () => {
-  it.each(TABLE)('%i MPa: %f and %f', (tensile, bending, torsion) => {
+  it.each(SEAT_EDGE_FACTORS)('%i MPa: %f and %f', (tensile, bending, torsion) => {
     const factors = seatEdgeNotchFactors(mPa(tensile))
     // the table is rounded to one decimal
     expect(Math.abs(factors.bending - bending)).toBeLessThanOrEqual(0.0501)

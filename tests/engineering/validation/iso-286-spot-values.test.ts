@@ -1,15 +1,18 @@
 /**
- * Sources: published limits of size in data/iso286-spot-values.ts, each with the table it was read in or marked as from
- * memory. Table values are exact: no tolerance.
+ * Sources: published limits of size in shared/validation/data/iso286-spot-values.ts, each with the source it was read in
+ * or marked as from memory. Table values are exact: no tolerance.
  */
 import { describe, expect, it } from 'vitest'
 import { EngineeringInputError } from '@shared/engineering/engineering-input-error'
 import { mm, toUm } from '@shared/engineering/quantities/units'
 import { GRADES, knownToleranceClasses, limitsOfClass } from '@shared/engineering/tolerances/iso286-limits'
-import { ISO_286_SPOT_VALUES, SPOT_SOURCES } from './data/iso286-spot-values'
+import { findSource } from '@shared/engineering/sources/source-registry'
+import { ISO286_SPOT_VALUES } from '@shared/validation/data/iso286-spot-values'
 
-describe.each(Object.entries(SPOT_SOURCES))('%s: %s', (source) => {
-  const values = ISO_286_SPOT_VALUES.filter((value) => value[4] === source)
+const spotSources = [...new Set(ISO286_SPOT_VALUES.map((value) => value[4]))]
+
+describe.each(spotSources.map((id) => [id, findSource(id).citation] as const))('%s: %s', (source) => {
+  const values = ISO286_SPOT_VALUES.filter((value) => value[4] === source)
   it.each(values)('%f %s is %f / %f µm', (size, toleranceClass, upper, lower) => {
     const limits = limitsOfClass(mm(size), toleranceClass)
     expect(toUm(limits.upperDeviation)).toBeCloseTo(upper, 6)
